@@ -1,0 +1,110 @@
+//! Weyl's dimension formula, exact at any size.
+
+use num_bigint::BigUint;
+use num_integer::Integer;
+use num_traits::One;
+
+use crate::orthogonal_basis::{coordinates, weyl_vector};
+use crate::{CartanType, Family, RootSystem};
+
+/// The dimension of the irrep with highest weight `labels`.
+///
+/// # Source
+/// Weyl's formula: the product over positive coroots of `(lambda + rho, alpha) / (rho, alpha)`,
+/// [Humphreys 1972], 24.3.
+pub(crate) fn dimension(cartan_type: CartanType, labels: &[u32]) -> BigUint {
+    let mut product = Quotient::default();
+    for_each_factor(cartan_type, labels, |above, below| {
+        product.times(above, below)
+    });
+    product.value()
+}
+
+/// Calls `take` with `(lambda + rho, alpha)` and `(rho, alpha)` for every positive coroot, the
+/// pairs scaled alike.
+fn for_each_factor(cartan_type: CartanType, labels: &[u32], mut take: impl FnMut(u64, u64)) {
+    let shifted = labels.iter().map(|&label| i64::from(label) + 1);
+    let Some((x, rho)) = coordinates(cartan_type, shifted).zip(weyl_vector(cartan_type)) else {
+        return exceptional_factors(cartan_type, labels, take);
+    };
+    let positive = |value: i64| u64::try_from(value).expect("lambda + rho is strictly dominant");
+    let signs_change = cartan_type.family() != Family::A;
+    for i in 0..x.len() {
+        for j in i + 1..x.len() {
+            take(positive(x[i] - x[j]), positive(rho[i] - rho[j]));
+            if signs_change {
+                take(positive(x[i] + x[j]), positive(rho[i] + rho[j]));
+            }
+        }
+        if matches!(cartan_type.family(), Family::B | Family::C) {
+            take(positive(x[i]), positive(rho[i]));
+        }
+    }
+}
+
+fn exceptional_factors(cartan_type: CartanType, labels: &[u32], mut take: impl FnMut(u64, u64)) {
+    for root in RootSystem::exceptional(cartan_type).positive_roots() {
+        let height: u64 = root.coroot().iter().copied().map(u64::from).sum();
+        let terms = root.coroot().iter().zip(labels);
+        let pairing: u64 = terms
+            .map(|(&c, &label)| u64::from(c) * u64::from(label))
+            .sum();
+        take(pairing + height, height);
+    }
+}
+
+/// A product of fractions: small while it can be, large when it must.
+struct Quotient {
+    above: u128,
+    below: u128,
+    spilled_above: BigUint,
+    spilled_below: BigUint,
+}
+
+impl Default for Quotient {
+    fn default() -> Self {
+        Self {
+            above: 1,
+            below: 1,
+            spilled_above: BigUint::one(),
+            spilled_below: BigUint::one(),
+        }
+    }
+}
+
+impl Quotient {
+    fn times(&mut self, above: u64, below: u64) {
+        if above == below {
+            return;
+        }
+        if self.times_small(above, below) {
+            return;
+        }
+        let common = self.above.gcd(&self.below);
+        self.above /= common;
+        self.below /= common;
+        if !self.times_small(above, below) {
+            self.spilled_above *= std::mem::replace(&mut self.above, above.into());
+            self.spilled_below *= std::mem::replace(&mut self.below, below.into());
+        }
+    }
+
+    fn times_small(&mut self, above: u64, below: u64) -> bool {
+        let products = (
+            self.above.checked_mul(above.into()),
+            self.below.checked_mul(below.into()),
+        );
+        if let (Some(a), Some(b)) = products {
+            (self.above, self.below) = (a, b);
+            return true;
+        }
+        false
+    }
+
+    fn value(self) -> BigUint {
+        if self.spilled_above.is_one() && self.spilled_below.is_one() {
+            return (self.above / self.below).into();
+        }
+        (self.spilled_above * self.above) / (self.spilled_below * self.below)
+    }
+}

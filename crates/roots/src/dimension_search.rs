@@ -1,0 +1,203 @@
+//! Irreps by their dimension: all of one dimension, and all up to a bound.
+//!
+//! The dimension grows with every label, so both searches stop where it passes the bound.
+
+use num_bigint::BigUint;
+
+use crate::{Error, Irrep, SimpleAlgebra, dimension};
+
+/// Looks for the irreps of given dimensions.
+///
+/// Holds the nodes whose fundamental irrep is within reach, the largest first: the two smallest,
+/// which take the most values, are walked together.
+#[derive(Clone, Debug)]
+pub(crate) struct DimensionSearch {
+    algebra: SimpleAlgebra,
+    nodes: Vec<(BigUint, usize)>,
+}
+
+impl DimensionSearch {
+    pub(crate) fn new(algebra: SimpleAlgebra) -> Self {
+        let fundamental = |node| Irrep::from_fn(algebra, |i| u32::from(i == node));
+        let mut nodes: Vec<_> = (0..algebra.rank())
+            .map(|node| (fundamental(node).dimension(), node))
+            .collect();
+        nodes.sort_by(|left, right| right.cmp(left));
+        Self { algebra, nodes }
+    }
+
+    /// Every irrep of that dimension, in no particular order.
+    ///
+    /// # Cost
+    /// The number of irreps up to that dimension in all but two labels, times the largest values
+    /// of those two: for SU(3), the worst, a few times the square root of the dimension.
+    pub(crate) fn of_dimension(&self, dimension: &BigUint) -> Vec<Irrep> {
+        let reach = self
+            .nodes
+            .iter()
+            .filter(|(smallest, _)| smallest <= dimension);
+        let mut walk = Walk {
+            algebra: self.algebra,
+            dimension,
+            nodes: reach.map(|(_, node)| *node).collect(),
+            labels: vec![0; self.algebra.rank()],
+            found: Vec::new(),
+        };
+        walk.from(0);
+        walk.found
+    }
+}
+
+struct Walk<'a> {
+    algebra: SimpleAlgebra,
+    dimension: &'a BigUint,
+    nodes: Vec<usize>,
+    labels: Vec<u32>,
+    found: Vec<Irrep>,
+}
+
+impl Walk<'_> {
+    fn from(&mut self, depth: usize) {
+        match self.nodes[depth..] {
+            [] => self.keep_if_equal(),
+            [last] => {
+                self.raise_to_bound(last);
+                self.keep_if_equal();
+                self.labels[last] = 0;
+            }
+            [up, down] => self.along_two(up, down),
+            [node, ..] => {
+                while !self.is_past() {
+                    self.from(depth + 1);
+                    if !self.raise(node) {
+                        break;
+                    }
+                }
+                self.labels[node] = 0;
+            }
+        }
+    }
+
+    /// As one label rises, the largest value of the other can only fall.
+    fn along_two(&mut self, up: usize, down: usize) {
+        self.raise_to_bound(down);
+        loop {
+            while self.is_past() && self.labels[down] > 0 {
+                self.labels[down] -= 1;
+            }
+            if self.is_past() {
+                break;
+            }
+            self.keep_if_equal();
+            if !self.raise(up) {
+                break;
+            }
+        }
+        self.labels[up] = 0;
+        self.labels[down] = 0;
+    }
+
+    /// The largest label at `node` that keeps within the bound, by doubling and halving.
+    fn raise_to_bound(&mut self, node: usize) {
+        let mut within = 0u32;
+        let mut step = 1u32;
+        while step > 0 {
+            let tried = within.checked_add(step);
+            self.labels[node] = tried.unwrap_or(u32::MAX);
+            if tried.is_some() && !self.is_past() {
+                within = self.labels[node];
+                step = step.saturating_mul(2);
+            } else {
+                step /= 2;
+            }
+        }
+        self.labels[node] = within;
+    }
+
+    fn raise(&mut self, node: usize) -> bool {
+        let raised = self.labels[node].checked_add(1);
+        self.labels[node] = raised.unwrap_or(u32::MAX);
+        raised.is_some()
+    }
+
+    fn current(&self) -> BigUint {
+        dimension::dimension(self.algebra.cartan_type(), &self.labels)
+    }
+
+    fn is_past(&self) -> bool {
+        self.current() > *self.dimension
+    }
+
+    fn keep_if_equal(&mut self) {
+        if self.current() == *self.dimension {
+            let labels = &self.labels;
+            self.found
+                .push(Irrep::from_fn(self.algebra, |node| labels[node]));
+        }
+    }
+}
+
+/// A bound on what is listed.
+#[derive(Clone, Debug, PartialEq, Eq)]
+pub enum CatalogBound {
+    /// Dimension at most this.
+    Dimension(BigUint),
+    /// Dynkin index at most this.
+    DynkinIndex(BigUint),
+}
+
+impl CatalogBound {
+    fn admits(&self, irrep: &Irrep) -> bool {
+        match self {
+            Self::Dimension(most) => irrep.dimension() <= *most,
+            Self::DynkinIndex(most) => irrep.dynkin_index() <= *most,
+        }
+    }
+}
+
+impl SimpleAlgebra {
+    /// Every irrep within `bound`, the singlet included, by dimension, then Dynkin index, then
+    /// name.
+    ///
+    /// # Errors
+    /// [`Error::TooMany`] where there are more than `limit`.
+    /// # Cost
+    /// For each irrep listed, at most `rank` that are not.
+    ///
+    /// ```
+    /// use roots::{CatalogBound, SimpleAlgebra};
+    /// let e8: SimpleAlgebra = "E8".parse()?;
+    /// let small = e8.irreps_within(&CatalogBound::Dimension(5000u32.into()), 100)?;
+    /// let names: Vec<String> = small.iter().map(|irrep| irrep.name()).collect();
+    /// assert_eq!(names, ["1", "248", "3875"]);
+    /// # Ok::<(), roots::Error>(())
+    /// ```
+    pub fn irreps_within(self, bound: &CatalogBound, limit: usize) -> Result<Vec<Irrep>, Error> {
+        let mut found = Vec::new();
+        // Each irrep is reached once: labels are raised at the last raised node or after it.
+        let mut open = vec![(vec![0u32; self.rank()], 0)];
+        while let Some((labels, from)) = open.pop() {
+            let irrep = Irrep::from_fn(self, |node| labels[node]);
+            if !bound.admits(&irrep) {
+                continue;
+            }
+            if found.len() == limit {
+                return Err(Error::TooMany {
+                    what: format!("the list of irreps of {self} within that bound"),
+                    limit,
+                    instead: "lower the bound or raise the limit".to_owned(),
+                });
+            }
+            found.push(irrep);
+            for node in from..self.rank() {
+                if let Some(raised) = labels[node].checked_add(1) {
+                    let mut labels = labels.clone();
+                    labels[node] = raised;
+                    open.push((labels, node));
+                }
+            }
+        }
+        crate::NameBook::sort(&mut found);
+        Ok(found)
+    }
+}
