@@ -26,6 +26,10 @@ impl DimensionSearch {
         Self { algebra, nodes }
     }
 
+    pub(crate) const fn algebra(&self) -> SimpleAlgebra {
+        self.algebra
+    }
+
     /// Every irrep of that dimension, in no particular order.
     ///
     /// # Cost

@@ -20,7 +20,7 @@ use num_bigint::BigUint;
 
 use crate::congruency::{Congruency, congruency};
 use crate::dimension_search::DimensionSearch;
-use crate::{CartanType, Family, Irrep, SimpleAlgebra};
+use crate::{CartanType, CatalogBound, Error, Family, Irrep, SimpleAlgebra};
 
 /// The dimension up to which irreps have names; beyond it they go by their labels.
 pub const NAMED_UP_TO: u32 = 1_000_000_000;
@@ -128,6 +128,20 @@ impl NameBook {
             Self::sort(&mut found);
             found
         })
+    }
+
+    /// Every irrep up to that dimension, as [`SimpleAlgebra::irreps_within`] lists them, and
+    /// remembers them all, so that naming each costs no search.
+    ///
+    /// # Errors
+    /// [`Error::TooMany`] where there are more than `limit`.
+    pub fn up_to_dimension(&mut self, most: &BigUint, limit: usize) -> Result<Vec<Irrep>, Error> {
+        let bound = CatalogBound::Dimension(most.clone());
+        let all = self.search.algebra().irreps_within(&bound, limit)?;
+        for equals in all.chunk_by(|left, right| left.dimension() == right.dimension()) {
+            self.known.insert(equals[0].dimension(), equals.to_vec());
+        }
+        Ok(all)
     }
 
     /// Sorts irreps of one algebra as a listing has them: by dimension, then Dynkin index, then in

@@ -1,0 +1,97 @@
+//! What can be typed.
+
+use std::path::PathBuf;
+
+use clap::{Parser, Subcommand, ValueEnum};
+use gaugewright::Failure;
+use gaugewright::request::{IrrepText, Request};
+use roots::Numbering;
+
+/// From a gauge group and multiplets to an exact verdict.
+#[derive(Debug, Parser)]
+#[command(version, max_term_width = 96, propagate_version = true)]
+pub(crate) struct Arguments {
+    /// How the answer is written.
+    #[arg(long, global = true, value_enum, default_value_t = Format::Text)]
+    pub(crate) format: Format,
+
+    /// How nodes of Dynkin diagrams are counted, on input and output: slansky or bourbaki.
+    #[arg(long, global = true, default_value_t, value_name = "NAME")]
+    pub(crate) numbering: Numbering,
+
+    #[command(subcommand)]
+    pub(crate) command: Command,
+}
+
+/// The formats of an answer.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, ValueEnum)]
+pub(crate) enum Format {
+    /// For a terminal.
+    Text,
+    /// One JSON object.
+    Json,
+    /// LaTeX that compiles by itself and can be \input.
+    Latex,
+}
+
+#[derive(Debug, Subcommand)]
+pub(crate) enum Command {
+    /// Facts of one simple algebra: roots, Cartan matrix, exponents, centre.
+    Algebra {
+        /// Its name, e.g. "SU(5)", so10, E6, D5.
+        algebra: String,
+    },
+    /// Facts of one irrep: dimension, indices, reality, class.
+    Irrep {
+        /// The algebra's name, e.g. "SO(10)".
+        algebra: String,
+        /// A name such as 16bar, or Dynkin labels such as "(0,0,0,1,0)".
+        irrep: String,
+    },
+    /// Irreps of an algebra up to a bound.
+    Catalog {
+        /// The algebra's name, e.g. E8.
+        algebra: String,
+        /// List irreps up to this dimension; 1000 or 20 times the algebra's own unless given.
+        #[arg(long, value_name = "N", conflicts_with = "max_index")]
+        max_dimension: Option<String>,
+        /// List irreps up to this Dynkin index.
+        #[arg(long, value_name = "N")]
+        max_index: Option<String>,
+        /// How many irreps may be listed.
+        #[arg(long, value_name = "N")]
+        limit: Option<usize>,
+    },
+    /// Requests as lines of JSON, one line of JSON out for each, in order.
+    Batch {
+        /// The file of requests; - is standard input.
+        file: PathBuf,
+    },
+}
+
+impl Command {
+    /// What is meant by what was typed; `Batch` holds many requests and is run by itself.
+    pub(crate) fn request(self) -> Result<Request, Failure> {
+        Ok(match self {
+            Self::Algebra { algebra } => Request::Algebra { algebra },
+            Self::Irrep { algebra, irrep } => Request::Irrep {
+                algebra,
+                irrep: IrrepText::Written(irrep),
+            },
+            Self::Catalog {
+                algebra,
+                max_dimension,
+                max_index,
+                limit,
+            } => Request::Catalog {
+                algebra,
+                max_dimension: max_dimension.map(Into::into),
+                max_index: max_index.map(Into::into),
+                limit,
+            },
+            Self::Batch { .. } => {
+                return Err(Failure::Request("a batch is no single request".to_owned()));
+            }
+        })
+    }
+}

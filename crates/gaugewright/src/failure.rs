@@ -1,0 +1,48 @@
+//! Why a request has no answer.
+
+use std::io;
+use std::path::{Path, PathBuf};
+
+/// Unusable input: what was wrong, where, and what to write instead.
+#[derive(Debug, thiserror::Error)]
+#[non_exhaustive]
+pub enum Failure {
+    /// A name, label or bound.
+    #[error(transparent)]
+    Algebra(#[from] roots::Error),
+    /// A line of a batch that is no request.
+    #[error(
+        "{0}; write one JSON object such as {{\"command\": \"irrep\", \"algebra\": \"SO(10)\", \"irrep\": \"16\"}}"
+    )]
+    Request(String),
+    /// A number that is none.
+    #[error("\"{written}\" is no {what}; write a whole number such as 1000")]
+    Number {
+        /// What was written.
+        written: String,
+        /// What it should have been.
+        what: &'static str,
+    },
+    /// A file that cannot be read.
+    #[error("{} cannot be read: {why}; name a file of text, or - for standard input where it applies", .path.display())]
+    Unreadable {
+        /// The file.
+        path: PathBuf,
+        /// Why.
+        why: String,
+    },
+    /// Standard output or a file that cannot be written.
+    #[error("the answer cannot be written: {0}")]
+    Output(io::Error),
+}
+
+impl Failure {
+    /// A file that cannot be read, and why.
+    #[must_use]
+    pub fn unreadable(path: &Path, why: impl ToString) -> Self {
+        Self::Unreadable {
+            path: path.to_owned(),
+            why: why.to_string(),
+        }
+    }
+}

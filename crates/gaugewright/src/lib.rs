@@ -1,0 +1,24 @@
+//! From "gauge group plus multiplets" to an exact verdict.
+//!
+//! This crate gathers the others under one roof and adds the answers and reports that the
+//! `gaugewright` command prints:
+//! - [`roots`]: simple Lie algebras and their irreps;
+//! - [`answer`]: what each command answers, as a value, as JSON and as a [`report::Page`];
+//! - [`request`]: what a command asks, from a terminal or a line of JSON.
+//!
+//! ```
+//! use gaugewright::request::Request;
+//! let line = r#"{"command": "irrep", "algebra": "SO(10)", "irrep": "16bar"}"#;
+//! let answer = Request::from_json_line(line)?.answer(Default::default())?;
+//! assert!(answer.json().contains(r#""labels":[0,0,0,1,0]"#));
+//! # Ok::<(), gaugewright::Failure>(())
+//! ```
+
+pub use roots;
+
+pub mod answer;
+mod failure;
+pub mod report;
+pub mod request;
+
+pub use failure::Failure;

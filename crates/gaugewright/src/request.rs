@@ -1,0 +1,192 @@
+//! What is asked: one request, from the command line or from a line of a batch.
+
+use std::fmt;
+
+use num_bigint::BigUint;
+use roots::{CatalogBound, Irrep, Numbering, SimpleAlgebra};
+use serde::Deserialize;
+use serde::de::{self, Deserializer, SeqAccess, Visitor};
+
+use crate::Failure;
+use crate::answer::{AlgebraAnswer, Answer, CATALOG_LIMIT, CatalogAnswer, IrrepAnswer};
+
+/// One request; the field names are those of a line of a batch.
+#[derive(Clone, Debug, Deserialize)]
+#[serde(tag = "command", rename_all = "lowercase", deny_unknown_fields)]
+#[non_exhaustive]
+pub enum Request {
+    /// Facts of one simple algebra.
+    Algebra {
+        /// Its name.
+        algebra: String,
+    },
+    /// Facts of one irrep.
+    Irrep {
+        /// Name of its algebra.
+        algebra: String,
+        /// Its name or labels.
+        irrep: IrrepText,
+    },
+    /// Irreps up to a bound.
+    Catalog {
+        /// Name of their algebra.
+        algebra: String,
+        /// Largest dimension.
+        #[serde(default)]
+        max_dimension: Option<WholeText>,
+        /// Largest Dynkin index.
+        #[serde(default)]
+        max_index: Option<WholeText>,
+        /// How many may be listed.
+        #[serde(default)]
+        limit: Option<usize>,
+    },
+}
+
+impl Request {
+    /// Reads one line of a batch.
+    ///
+    /// # Errors
+    /// [`Failure::Request`] where the line is no request.
+    pub fn from_json_line(line: &str) -> Result<Self, Failure> {
+        serde_json::from_str(line).map_err(|error| Failure::Request(error.to_string()))
+    }
+
+    /// The answer, with nodes in the order of `numbering`.
+    ///
+    /// # Errors
+    /// What is wrong with the request, and what to write instead.
+    pub fn answer(self, numbering: Numbering) -> Result<Box<dyn Answer>, Failure> {
+        Ok(match self {
+            Self::Algebra { algebra } => {
+                Box::new(AlgebraAnswer::new(read_algebra(&algebra)?, numbering))
+            }
+            Self::Irrep { algebra, irrep } => {
+                let irrep = irrep.read(read_algebra(&algebra)?, numbering)?;
+                Box::new(IrrepAnswer::new(irrep, numbering))
+            }
+            Self::Catalog {
+                algebra,
+                max_dimension,
+                max_index,
+                limit,
+            } => {
+                let algebra = read_algebra(&algebra)?;
+                let bound = bound(algebra, max_dimension, max_index)?;
+                let limit = limit.unwrap_or(CATALOG_LIMIT);
+                Box::new(CatalogAnswer::new(algebra, bound, limit, numbering)?)
+            }
+        })
+    }
+}
+
+fn read_algebra(written: &str) -> Result<SimpleAlgebra, Failure> {
+    Ok(written.parse()?)
+}
+
+fn bound(
+    algebra: SimpleAlgebra,
+    max_dimension: Option<WholeText>,
+    max_index: Option<WholeText>,
+) -> Result<CatalogBound, Failure> {
+    match (max_dimension, max_index) {
+        (Some(_), Some(_)) => Err(Failure::Request(
+            "max_dimension and max_index cannot both bound a catalogue".to_owned(),
+        )),
+        (Some(most), None) => Ok(CatalogBound::Dimension(most.read("largest dimension")?)),
+        (None, Some(most)) => Ok(CatalogBound::DynkinIndex(most.read("largest index")?)),
+        (None, None) => Ok(CatalogAnswer::usual_bound(algebra)),
+    }
+}
+
+/// An irrep as it is written: a name, labels in brackets, or in JSON a list of labels.
+#[derive(Clone, Debug, PartialEq, Eq)]
+pub enum IrrepText {
+    /// A name or labels in brackets.
+    Written(String),
+    /// One label per node.
+    Labels(Vec<u32>),
+}
+
+impl IrrepText {
+    /// The irrep of `algebra` that is meant.
+    ///
+    /// # Errors
+    /// What is wrong with the text or the labels.
+    pub fn read(&self, algebra: SimpleAlgebra, numbering: Numbering) -> Result<Irrep, Failure> {
+        Ok(match self {
+            Self::Written(written) => algebra.read_irrep_in(numbering, written)?,
+            Self::Labels(labels) => {
+                // The count is checked before nodes are rearranged.
+                let irrep = algebra.irrep(labels)?;
+                algebra.irrep(&numbering.to_slansky(algebra.cartan_type(), irrep.labels()))?
+            }
+        })
+    }
+}
+
+impl<'de> Deserialize<'de> for IrrepText {
+    fn deserialize<D: Deserializer<'de>>(deserializer: D) -> Result<Self, D::Error> {
+        deserializer.deserialize_any(IrrepVisitor)
+    }
+}
+
+struct IrrepVisitor;
+
+impl<'de> Visitor<'de> for IrrepVisitor {
+    type Value = IrrepText;
+
+    fn expecting(&self, f: &mut fmt::Formatter<'_>) -> fmt::Result {
+        f.write_str(
+            "an irrep: a name such as \"16\" or a list of Dynkin labels such as [0,0,0,0,1]",
+        )
+    }
+
+    fn visit_str<E: de::Error>(self, written: &str) -> Result<IrrepText, E> {
+        Ok(IrrepText::Written(written.to_owned()))
+    }
+
+    fn visit_u64<E: de::Error>(self, dimension: u64) -> Result<IrrepText, E> {
+        Ok(IrrepText::Written(dimension.to_string()))
+    }
+
+    fn visit_seq<A: SeqAccess<'de>>(self, mut labels: A) -> Result<IrrepText, A::Error> {
+        let mut read = Vec::new();
+        while let Some(label) = labels.next_element()? {
+            read.push(label);
+        }
+        Ok(IrrepText::Labels(read))
+    }
+}
+
+/// A whole number of any length: a JSON number, or digits in a string.
+#[derive(Clone, Debug, PartialEq, Eq)]
+pub struct WholeText(String);
+
+impl WholeText {
+    fn read(&self, what: &'static str) -> Result<BigUint, Failure> {
+        const MOST_DIGITS: usize = 1000;
+        let digits = self.0.len() <= MOST_DIGITS && self.0.bytes().all(|b| b.is_ascii_digit());
+        let value = digits.then(|| self.0.parse().ok()).flatten();
+        value.ok_or_else(|| Failure::Number {
+            written: self.0.chars().take(60).collect(),
+            what,
+        })
+    }
+}
+
+impl From<String> for WholeText {
+    fn from(written: String) -> Self {
+        Self(written)
+    }
+}
+
+impl<'de> Deserialize<'de> for WholeText {
+    fn deserialize<D: Deserializer<'de>>(deserializer: D) -> Result<Self, D::Error> {
+        match serde_json::Value::deserialize(deserializer)? {
+            serde_json::Value::Number(number) => Ok(Self(number.to_string())),
+            serde_json::Value::String(written) => Ok(Self(written)),
+            other => Err(de::Error::custom(format!("{other} is no whole number"))),
+        }
+    }
+}
