@@ -3,8 +3,8 @@
 use num_rational::BigRational;
 use num_traits::{One, Zero};
 
-use crate::transformation::read_fraction;
-use crate::{Error, Group, Owner, Part, Problem, Spectrum, Written};
+use crate::transformation::{bounded, read_fraction};
+use crate::{Error, Group, Owner, Part, Problem, Spectrum, Symmetry, Written};
 
 /// The electric charge: a sum over gauge symmetries of coefficients times charges.
 ///
@@ -36,7 +36,7 @@ impl ElectricCharge {
         for (label, written) in draft.terms {
             let wrong = |part, problem| Error::new(Owner::Model, part, problem);
             let Some(i) = spectrum.symmetry_index(&label) else {
-                let choice = spectrum.symmetry_choice(&label);
+                let choice = spectrum.symmetry_choice(&label, is_fit);
                 let problem = Problem::UnknownSymmetry { choice };
                 return Err(wrong(Part::ElectricCharge(label), problem));
             };
@@ -92,6 +92,10 @@ impl ElectricCharge {
     }
 }
 
+fn is_fit(symmetry: &Symmetry) -> bool {
+    symmetry.is_gauged() && !matches!(symmetry.group(), Group::Discrete(_))
+}
+
 fn read(
     written: Vec<Written>,
     spectrum: &Spectrum,
@@ -121,8 +125,8 @@ fn read(
 fn read_coefficient(written: Written) -> Result<BigRational, Problem> {
     match written {
         Written::Text(written) => read_fraction(&written),
-        Written::Whole(whole) => Ok(whole.into()),
-        Written::Charge(value) => Ok(value),
+        Written::Whole(whole) => bounded(whole.into()),
+        Written::Charge(value) => bounded(value),
         Written::Irrep(irrep) => Err(Problem::WrongKind {
             found: format!("the irrep {} of {}", irrep.bracketed(), irrep.algebra()),
             group: "the electric charge".into(),

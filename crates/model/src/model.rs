@@ -1,7 +1,9 @@
 //! A model: a spectrum with its title, supersymmetry and electric charge.
 
 use crate::suggestion::shortened;
-use crate::{ElectricCharge, ElectricChargeDraft, Error, Field, Owner, Part, Problem, Spectrum};
+use crate::{
+    ElectricCharge, ElectricChargeDraft, Error, Field, Owner, Part, Problem, Spectrum, Symmetry,
+};
 
 /// Characters that a title may have.
 pub const MOST_TITLE_CHARACTERS: usize = 300;
@@ -64,7 +66,7 @@ impl Model {
         }
         let hypercharge = spectrum
             .symmetry_index("hypercharge")
-            .filter(|&i| is_gauged_u1(&spectrum, i));
+            .filter(|&i| is_gauged_u1(&spectrum.symmetries()[i]));
         Ok(Self {
             electric_charge: ElectricCharge::isospin_and_hypercharge(&spectrum, hypercharge),
             title,
@@ -85,10 +87,10 @@ impl Model {
     pub fn with_hypercharge(mut self, label: &str) -> Result<Self, Error> {
         let wrong = |problem| Error::new(Owner::Model, Part::Hypercharge, problem);
         let found = self.spectrum.symmetry_index(label).ok_or_else(|| {
-            let choice = self.spectrum.symmetry_choice(label);
+            let choice = self.spectrum.symmetry_choice(label, is_gauged_u1);
             wrong(Problem::UnknownSymmetry { choice })
         })?;
-        if !is_gauged_u1(&self.spectrum, found) {
+        if !is_gauged_u1(&self.spectrum.symmetries()[found]) {
             let symmetry = label.to_owned();
             return Err(wrong(Problem::NotHypercharge { symmetry }));
         }
@@ -171,8 +173,7 @@ impl Model {
     }
 }
 
-fn is_gauged_u1(spectrum: &Spectrum, symmetry: usize) -> bool {
-    let symmetry = &spectrum.symmetries()[symmetry];
+fn is_gauged_u1(symmetry: &Symmetry) -> bool {
     symmetry.is_gauged() && symmetry.group().is_u1()
 }
 

@@ -88,6 +88,8 @@ pub enum Problem {
         /// The fraction it is.
         fraction: String,
     },
+    /// A fraction with more than 60 digits above or below.
+    TooManyDigits,
     /// A charge under Z(N) that is not whole.
     BadDiscreteCharge {
         /// What was written.
@@ -167,7 +169,7 @@ impl Problem {
     #[must_use]
     pub fn message(&self) -> String {
         match self {
-            Self::Roots(error) => split(&error.to_string()).0.to_owned(),
+            Self::Roots(error) => split(error).0,
             Self::ProductGroup { written } => format!("\"{written}\" is a product of groups"),
             Self::BadCyclicOrder { written } => format!("there is no Z(N) \"{written}\""),
             Self::UnknownField { choice } => {
@@ -196,6 +198,7 @@ impl Problem {
             Self::DecimalCharge { written, .. } => {
                 format!("the decimal {written} is no exact charge")
             }
+            Self::TooManyDigits => "a fraction has more than 60 digits above or below".into(),
             Self::BadDiscreteCharge { written, group } => {
                 format!("\"{written}\" is no charge under {group}")
             }
@@ -238,7 +241,7 @@ impl Problem {
             Self::Roots(roots::Error::LabelCount { expected, .. }) => {
                 format!("write {expected} in brackets, or a dimension")
             }
-            Self::Roots(error) => split(&error.to_string()).1.to_owned(),
+            Self::Roots(error) => split(error).1,
             Self::ProductGroup { .. } => "write one symmetry for each factor".into(),
             Self::BadCyclicOrder { .. } => {
                 format!("write Z(2) or larger, at most Z({})", u32::MAX)
@@ -261,6 +264,7 @@ impl Problem {
             Self::Repeated { .. } => "give each symmetry once".into(),
             Self::WrongKind { expected, .. } => format!("write {expected}"),
             Self::DecimalCharge { fraction, .. } => format!("write \"{fraction}\""),
+            Self::TooManyDigits => "write it in other units, with fewer digits".into(),
             Self::BadDiscreteCharge { .. } => "write a whole number, such as 1 or -1".into(),
             Self::BadCopies { .. } => format!("write a whole number from 1 to {MOST_COPIES}"),
             Self::NoUnknownCharge => "leave it out, or write \"?\" as a charge".into(),
@@ -296,15 +300,35 @@ impl std::fmt::Display for Problem {
 
 impl std::error::Error for Problem {}
 
-/// What is wrong and what to write instead, at the first semicolon outside quotation marks.
-fn split(sentence: &str) -> (&str, &str) {
-    let mut quoted = false;
-    for (place, character) in sentence.char_indices() {
-        match character {
-            '"' => quoted = !quoted,
-            ';' if !quoted => return (&sentence[..place], sentence[place + 1..].trim_start()),
-            _ => {}
-        }
+/// What is wrong and what to write instead: an error of `roots` is one sentence with a semicolon
+/// between, the first after the text it repeats, which may hold others.
+fn split(error: &roots::Error) -> (String, String) {
+    let sentence = error.to_string();
+    let repeated = repeated(error).map(|written| format!("\"{written}\""));
+    let start = repeated.and_then(|repeated| Some(sentence.find(&repeated)? + repeated.len()));
+    let start = start.unwrap_or(0);
+    match sentence[start..].split_once(';') {
+        Some((message, help)) => (
+            format!("{}{message}", &sentence[..start]),
+            help.trim_start().to_owned(),
+        ),
+        None => (sentence, String::new()),
     }
-    (sentence, "")
+}
+
+fn repeated(error: &roots::Error) -> Option<&str> {
+    use roots::Error as E;
+    match error {
+        E::RankTooLarge { written }
+        | E::NotSimple { written, .. }
+        | E::UnknownAlgebra { written, .. }
+        | E::EmptyFactor { written }
+        | E::BadLabel { written, .. }
+        | E::BadIrrep { written, .. }
+        | E::UnknownIrrep { written, .. }
+        | E::AmbiguousIrrep { written, .. }
+        | E::BeyondNames { written }
+        | E::BadNumber { written } => Some(written),
+        _ => None,
+    }
 }

@@ -137,7 +137,7 @@ impl Spectrum {
         let mut found = vec![None; self.symmetries.len()];
         for (label, written) in draft.under.drain(..) {
             let Some(i) = self.symmetry_index(&label) else {
-                let choice = self.symmetry_choice(&label);
+                let choice = self.symmetry_choice(&label, |_| true);
                 let problem = Problem::UnknownSymmetry { choice };
                 return Err((Part::SymmetryLabel(label), problem.into()));
             };
@@ -247,8 +247,10 @@ impl Spectrum {
         all.any(|one| *one == Transformation::UnknownCharge)
     }
 
-    pub(crate) fn symmetry_choice(&self, written: &str) -> Choice {
-        Choice::new(written, self.symmetries.iter().map(Symmetry::label))
+    /// The labels, of those symmetries that are `fit`, one of which `written` should have been.
+    pub(crate) fn symmetry_choice(&self, written: &str, fit: fn(&Symmetry) -> bool) -> Choice {
+        let symmetries = self.symmetries.iter().filter(|symmetry| fit(symmetry));
+        Choice::new(written, symmetries.map(Symmetry::label))
     }
 }
 

@@ -88,8 +88,8 @@ impl Written {
             },
             Group::U1 => match self {
                 Self::Text(written) => read_charge(&written),
-                Self::Whole(charge) => Ok(Transformation::Charge(charge.into())),
-                Self::Charge(charge) => Ok(Transformation::Charge(charge)),
+                Self::Whole(charge) => bounded(charge.into()).map(Transformation::Charge),
+                Self::Charge(charge) => bounded(charge).map(Transformation::Charge),
                 Self::Irrep(_) => Err(self.wrong_kind(group)),
             },
             Group::Discrete(order) => match self {
@@ -141,6 +141,17 @@ pub(crate) fn read_fraction(written: &str) -> Result<BigRational, Problem> {
         },
         Err(_) => error.into(),
     })
+}
+
+/// The number, unless it has more digits than a model file can hold.
+pub(crate) fn bounded(value: BigRational) -> Result<BigRational, Problem> {
+    // Sixty digits take no more than 200 bits; what has far more is not spelt out.
+    let bits = value.numer().bits().max(value.denom().bits());
+    let short = bits <= 256 && roots::read_rational(&value.to_string()).is_ok();
+    if short {
+        return Ok(value);
+    }
+    Err(Problem::TooManyDigits)
 }
 
 fn read_discrete(
