@@ -20,24 +20,45 @@ pub(crate) fn dimension(cartan_type: CartanType, labels: &[u32]) -> BigUint {
     product.value()
 }
 
-/// Calls `take` with `(lambda + rho, alpha)` and `(rho, alpha)` for every positive coroot, the
-/// pairs scaled alike.
+/// Number of weights in the Weyl orbit of a dominant weight.
+///
+/// # Source
+/// The order of a Weyl group is the product over positive coroots of `(height + 1) / height`
+/// ([Macdonald 1972]); that of the stabiliser is the part of it over coroots orthogonal to the
+/// weight.
+pub(crate) fn orbit_size(cartan_type: CartanType, labels: &[u32]) -> BigUint {
+    let mut product = Quotient::default();
+    for_each_factor(cartan_type, labels, |above, below| {
+        if above != below {
+            product.times(below + 1, below);
+        }
+    });
+    product.value()
+}
+
+/// Calls `take` with the pairings of lambda + rho and of rho with every positive coroot; the
+/// second is the height of the coroot.
 fn for_each_factor(cartan_type: CartanType, labels: &[u32], mut take: impl FnMut(u64, u64)) {
     let shifted = labels.iter().map(|&label| i64::from(label) + 1);
     let Some((x, rho)) = coordinates(cartan_type, shifted).zip(weyl_vector(cartan_type)) else {
         return exceptional_factors(cartan_type, labels, take);
     };
     let positive = |value: i64| u64::try_from(value).expect("lambda + rho is strictly dominant");
-    let signs_change = cartan_type.family() != Family::A;
+    let family = cartan_type.family();
+    // All but SU(N) have doubled coordinates, all even or all odd.
+    let unit = if family == Family::A { 1 } else { 2 };
+    let own = if family == Family::C { 2 } else { 1 };
     for i in 0..x.len() {
         for j in i + 1..x.len() {
-            take(positive(x[i] - x[j]), positive(rho[i] - rho[j]));
-            if signs_change {
-                take(positive(x[i] + x[j]), positive(rho[i] + rho[j]));
+            let difference = |y: &[i64]| positive(y[i] - y[j]) / unit;
+            take(difference(&x), difference(&rho));
+            if family != Family::A {
+                let sum = |y: &[i64]| positive(y[i] + y[j]) / unit;
+                take(sum(&x), sum(&rho));
             }
         }
-        if matches!(cartan_type.family(), Family::B | Family::C) {
-            take(positive(x[i]), positive(rho[i]));
+        if matches!(family, Family::B | Family::C) {
+            take(positive(x[i]) / own, positive(rho[i]) / own);
         }
     }
 }

@@ -136,6 +136,56 @@ pub enum Error {
         /// What to do about it.
         instead: String,
     },
+    /// A computation whose size is beyond its limit.
+    #[error("{what} takes {size}, beyond the limit of {limit}; {instead}")]
+    BeyondLimit {
+        /// What was asked for.
+        what: String,
+        /// An estimate of its size, in words.
+        size: String,
+        /// The limit that applies.
+        limit: u64,
+        /// What to do about it.
+        instead: String,
+    },
+    /// Irreps of different algebras in one product.
+    #[error("{irrep} is no irrep of {algebra}; the factors of a product share one algebra")]
+    MixedAlgebras {
+        /// Name of the algebra of the product.
+        algebra: String,
+        /// The irrep that does not belong to it, with its algebra.
+        irrep: String,
+    },
+    /// A label of a weight that is out of range.
+    #[error("{label} is out of range for the label of a weight; labels are at most {most} in size")]
+    WeightLabel {
+        /// The label.
+        label: i64,
+        /// The largest size that is accepted.
+        most: i64,
+    },
+    /// A sum of characters that is the character of nothing.
+    #[error(
+        "the character holds {irrep} {times} times, and so is that of no representation; \
+         read its irreps with their signs instead"
+    )]
+    NotARepresentation {
+        /// The irrep.
+        irrep: String,
+        /// Its negative multiplicity.
+        times: String,
+    },
+    /// No partition.
+    #[error(
+        "\"{written}\" is no partition; write whole numbers that do not rise, as in 2,1, \
+         with sum at most {most}"
+    )]
+    BadPartition {
+        /// What was written.
+        written: String,
+        /// The largest sum that is accepted.
+        most: u32,
+    },
     /// The number of charges or irreps is not the number of factors.
     #[error("{algebra} has {expected} factors; {found} irreps or charges were given")]
     FactorCount {

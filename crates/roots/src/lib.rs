@@ -13,6 +13,10 @@
 //!   [`RootSystem`], [`WeightMetric`] and [`Center`] come from it.
 //! - [`Irrep`] is one irrep by its Dynkin labels, with dimension, indices, reality, class and
 //!   conjugate; [`NameBook`] gives many of them their names.
+//! - [`Weight`] and its Weyl orbit; [`Irrep::dominant_weights`] and [`Irrep::weights`] with
+//!   multiplicities; [`Character`], which adds and multiplies them.
+//! - [`SimpleAlgebra::product`], [`Irrep::power`] and [`Irrep::tensor_power`] give a
+//!   [`Decomposition`]; [`ProductCache`] remembers for a scan, [`Limits`] bound the work.
 //! - [`ReductiveAlgebra`] is a product of simple algebras and U(1)s, [`ReductiveIrrep`] an irrep
 //!   of it.
 //!
@@ -22,37 +26,68 @@ mod algebra;
 mod algebra_name;
 mod cartan_matrix;
 mod cartan_type;
+mod character;
 mod congruency;
+mod count;
+mod decomposition;
 mod dimension;
 mod dimension_search;
+mod dominant_weights;
 mod dynkin_diagram;
 mod error;
+mod frame;
 mod index;
 mod integer_lattice;
 mod irrep;
 mod irrep_name;
 mod irrep_text;
+mod klimyk;
+mod lane_table;
+mod lanes;
+mod limits;
+mod littlewood_richardson;
+mod multiplicities;
 mod numbering;
+mod orbit_walk;
 mod orthogonal_basis;
+mod partition;
+mod plethysm;
+mod product_cache;
 mod rational;
 mod reality;
 mod reductive;
+mod reductive_product;
 mod root_system;
+mod single_multiplicity;
+mod tensor_product;
+#[cfg(test)]
+mod two_ways;
+mod weight;
+mod weight_division;
 mod weight_metric;
+mod weight_system;
 
 pub use algebra::SimpleAlgebra;
 pub use cartan_matrix::{CartanMatrix, InverseCartanMatrix};
 pub use cartan_type::{CartanType, Family, MAX_RANK};
+pub use character::Character;
 pub use congruency::{Center, Congruency};
+pub use decomposition::Decomposition;
 pub use dimension_search::CatalogBound;
 pub use dynkin_diagram::DynkinDiagram;
 pub use error::Error;
 pub use integer_lattice::{FiniteAbelian, rows_without};
 pub use irrep::Irrep;
 pub use irrep_name::{IrrepName, NAMED_UP_TO, NameBook};
+pub use limits::Limits;
 pub use numbering::Numbering;
+pub use partition::Partition;
+pub use product_cache::ProductCache;
 pub use rational::read_rational;
 pub use reality::Reality;
 pub use reductive::{Factor, Part, ReductiveAlgebra, ReductiveIrrep};
+pub use reductive_product::ReductiveDecomposition;
 pub use root_system::{Root, RootSystem};
+pub use weight::Weight;
+pub use weight_division::product_by_weight_division;
 pub use weight_metric::WeightMetric;

@@ -1,0 +1,8 @@
+//! What the benches share: the fixed cases, a stopwatch, and GAP as the peer.
+//!
+//! GAP is timed inside its own process, without its start-up and with the Lie algebra and its root
+//! system already made; each case is run three times there and the fastest is taken.
+
+pub mod case;
+pub mod clock;
+pub mod peer;

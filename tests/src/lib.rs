@@ -1,0 +1,3 @@
+//! What the checks of this workspace stand on.
+
+pub mod gap;
