@@ -1,0 +1,43 @@
+//! Every condition of a spectrum.
+
+use model::Spectrum;
+
+use crate::{Anomaly, Condition, UnknownCharge};
+
+/// Every anomaly condition of a spectrum with its value.
+#[derive(Clone, Debug, PartialEq, Eq)]
+pub struct Report {
+    conditions: Vec<Condition>,
+}
+
+impl Report {
+    /// Sums every anomaly of `spectrum`.
+    ///
+    /// # Errors
+    /// [`UnknownCharge`] where a charge is written `"?"`.
+    pub fn of(spectrum: &Spectrum) -> Result<Self, UnknownCharge> {
+        let conditions = Anomaly::all(spectrum).map(|anomaly| Condition::of(anomaly, spectrum));
+        Ok(Self {
+            conditions: conditions.collect::<Result<_, _>>()?,
+        })
+    }
+
+    /// The conditions: cubic, mixed, gravitational, global, discrete.
+    #[must_use]
+    pub fn conditions(&self) -> &[Condition] {
+        &self.conditions
+    }
+
+    /// The conditions that must hold and do not.
+    pub fn violated(&self) -> impl Iterator<Item = &Condition> {
+        self.conditions
+            .iter()
+            .filter(|condition| condition.is_violated())
+    }
+
+    /// Whether every condition that must hold does.
+    #[must_use]
+    pub fn is_consistent(&self) -> bool {
+        self.violated().next().is_none()
+    }
+}
