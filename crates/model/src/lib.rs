@@ -26,7 +26,11 @@
 //! Chirality: anomalies are summed over left-handed Weyl fermions; a right-handed field counts as
 //! its left-handed conjugate, which [`Multiplet::left_handed_sign`] tells.
 
+mod center_action;
+mod charged_states;
+mod chirality;
 mod decimal;
+mod degrees_of_freedom;
 mod draft;
 mod electric_charge;
 mod error;
@@ -42,7 +46,10 @@ mod suggestion;
 mod symmetry;
 mod transformation;
 
+pub use charged_states::ChargedStates;
+pub use chirality::FermionClass;
 pub use decimal::{Mass, read_decimal, write_decimal};
+pub use degrees_of_freedom::DegreesOfFreedom;
 pub use draft::MultipletDraft;
 pub use electric_charge::{ElectricCharge, ElectricChargeDraft};
 pub use error::{Error, Owner, Part};
