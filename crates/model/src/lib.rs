@@ -22,11 +22,15 @@
 //! - [`Symmetry`] is a labelled [`Group`], gauged or global; [`Multiplet`] is a [`Field`] with one
 //!   [`Transformation`] for each of them; [`Spectrum`] holds both, checked.
 //! - [`Model`] adds a title, supersymmetry, the hypercharge and the [`ElectricCharge`].
+//! - [`Model::from_toml`] reads a model file, [`Model::from_json`] the same shape as JSON, and
+//!   [`Model::to_toml`] writes one; a [`ModelFileError`] says where the file is wrong, and what to
+//!   write instead.
 //!
 //! Chirality: anomalies are summed over left-handed Weyl fermions; a right-handed field counts as
 //! its left-handed conjugate, which [`Multiplet::left_handed_sign`] tells.
 
 mod decimal;
+mod demo;
 mod draft;
 mod electric_charge;
 mod error;
@@ -43,6 +47,7 @@ mod symmetry;
 mod transformation;
 
 pub use decimal::{Mass, read_decimal, write_decimal};
+pub use demo::{DEMO_FILE, demo};
 pub use draft::MultipletDraft;
 pub use electric_charge::{ElectricCharge, ElectricChargeDraft};
 pub use error::{Error, Owner, Part};
