@@ -22,6 +22,9 @@
 //! - [`Symmetry`] is a labelled [`Group`], gauged or global; [`Multiplet`] is a [`Field`] with one
 //!   [`Transformation`] for each of them; [`Spectrum`] holds both, checked.
 //! - [`Model`] adds a title, supersymmetry, the hypercharge and the [`ElectricCharge`].
+//! - [`Model::from_toml`] reads a model file, [`Model::from_json`] the same shape as JSON, and
+//!   [`Model::to_toml`] writes one; a [`ModelFileError`] says where the file is wrong, and what to
+//!   write instead.
 //!
 //! Chirality: anomalies are summed over left-handed Weyl fermions; a right-handed field counts as
 //! its left-handed conjugate, which [`Multiplet::left_handed_sign`] tells.
@@ -31,6 +34,7 @@ mod charged_states;
 mod chirality;
 mod decimal;
 mod degrees_of_freedom;
+mod demo;
 mod draft;
 mod electric_charge;
 mod error;
@@ -50,6 +54,7 @@ pub use charged_states::ChargedStates;
 pub use chirality::FermionClass;
 pub use decimal::{Mass, read_decimal, write_decimal};
 pub use degrees_of_freedom::DegreesOfFreedom;
+pub use demo::{DEMO_FILE, demo};
 pub use draft::MultipletDraft;
 pub use electric_charge::{ElectricCharge, ElectricChargeDraft};
 pub use error::{Error, Owner, Part};

@@ -33,594 +33,196 @@ fn error(text: &str) -> ModelFileError {
     Model::from_toml(text).expect_err(text)
 }
 
-/// `from` replaced by `to`: the line and column of the error, and what its help must say.
-struct Case(&'static str, &'static str, usize, usize, &'static str);
+/// Each line is `from => to @ line:column help`: with `from` replaced by `to`, the error is there
+/// and its help says that. `\n` is the end of a line and `\\` a backslash.
+#[track_caller]
+fn check(cases: &str) {
+    Model::from_toml(GOOD).unwrap();
+    for case in cases.trim().lines() {
+        let (from, rest) = case.split_once(" => ").unwrap();
+        let (to, rest) = rest.rsplit_once(" @ ").unwrap();
+        let (place, help) = rest.split_once(' ').unwrap();
+        let (line, column) = place.split_once(':').unwrap();
+        let (from, to) = (unescaped(from), unescaped(to));
+        assert!(GOOD.contains(&from), "{from}");
+        let text = GOOD.replacen(&from, &to, 1);
+        check_place(&text, line.parse().unwrap(), column.parse().unwrap(), help);
+    }
+}
+
+fn unescaped(text: &str) -> String {
+    let parts = text.split("\\\\").map(|part| part.replace("\\n", "\n"));
+    parts.collect::<Vec<_>>().join("\\")
+}
 
 #[track_caller]
-fn check(cases: &[Case]) {
-    Model::from_toml(GOOD).unwrap();
-    for Case(from, to, line, column, help) in cases {
-        assert!(GOOD.contains(from), "{from}");
-        let text = GOOD.replacen(from, to, 1);
-        let error = error(&text);
-        let place = (error.line(), error.column());
-        assert_eq!(place, (Some(*line), Some(*column)), "{to}: {error}");
-        assert!(error.help().contains(help), "{to}: {error}");
-        assert!(!error.message().is_empty());
-        assert_eq!(error.source_line(), text.lines().nth(line - 1), "{to}");
-        let sentence = format!("line {line}, column {column}: ");
-        assert!(error.to_string().starts_with(&sentence), "{error}");
-        let span = error.span().unwrap();
-        assert!(text.is_char_boundary(span.start) && text.is_char_boundary(span.end));
-    }
+fn check_place(text: &str, line: usize, column: usize, help: &str) {
+    let error = error(text);
+    let place = (error.line(), error.column());
+    assert_eq!(place, (Some(line), Some(column)), "{text}: {error}");
+    assert!(error.help().contains(help), "{text}: {error}");
+    assert!(!error.message().is_empty());
+    let source = text.split('\n').nth(line - 1);
+    let source = source.map(|line| line.trim_matches(['\r', '\u{feff}']));
+    assert_eq!(error.source_line(), source, "{text}");
+    let sentence = format!("line {line}, column {column}: ");
+    assert!(error.to_string().starts_with(&sentence), "{error}");
+    let span = error.span().unwrap();
+    assert!(text.is_char_boundary(span.start) && text.is_char_boundary(span.end));
 }
 
 #[test]
 fn the_model_table() {
-    check(&[
-        Case("[model]", "[modle]", 1, 2, "did you mean \"model\"?"),
-        Case("[model]", "[model", 1, 7, "[model], [[symmetry]]"),
-        Case(
-            "[model]",
-            "[[model]]",
-            1,
-            1,
-            "write a table with the keys title",
-        ),
-        Case("title =", "titel =", 2, 1, "did you mean \"title\"?"),
-        Case("\"Quarks\"", "3", 2, 9, "text in quotation marks"),
-        Case("\"Quarks\"", "Quarks", 2, 9, "in quotation marks"),
-        Case("\"Quarks\"", "\"Quarks", 2, 16, "in quotation marks"),
-        Case("\"Quarks\"", "\"\"", 2, 9, "\"Standard Model\""),
-        Case(
-            "\"Quarks\"",
-            "\"\"\"\nQuarks\n\"\"\"",
-            2,
-            9,
-            "write one line",
-        ),
-        Case(
-            "title = \"Quarks\"",
-            "title",
-            2,
-            6,
-            "title = \"Standard Model\"",
-        ),
-        Case(
-            "title = \"Quarks\"",
-            "title = \"a\"\ntitle = \"b\"",
-            3,
-            1,
-            "write each key once",
-        ),
-        Case(
-            "supersymmetric",
-            "suppersymetric",
-            3,
-            1,
-            "did you mean \"supersymmetric\"?",
-        ),
-        Case(
-            "supersymmetric = false",
-            "supersymmetric = \"no\"",
-            3,
-            18,
-            "= true, or leave it out",
-        ),
-        Case(
-            "supersymmetric = false",
-            "supersymmetric = true",
-            19,
-            9,
-            "\"chiral superfield\"",
-        ),
-        Case(
-            "supersymmetric = false",
-            "hypercharge = \"weak\"",
-            3,
-            15,
-            "the label of a gauged U(1)",
-        ),
-        Case(
-            "supersymmetric = false",
-            "hypercharge = \"hyper charge\"",
-            3,
-            15,
-            "mean \"hypercharge\"?",
-        ),
-        Case(
-            "supersymmetric = false",
-            "hypercharge = 1",
-            3,
-            15,
-            "text in quotation marks",
-        ),
-        Case(
-            "supersymmetric = false",
-            "source = 1982",
-            3,
-            10,
-            "text in quotation marks",
-        ),
-        Case(
-            "supersymmetric = false",
-            "notes = [\"a\"]",
-            3,
-            9,
-            "text in quotation marks",
-        ),
-    ]);
+    check(
+        r#"
+[model] => [modle] @ 1:2 did you mean "model"?
+[model] => [model @ 1:7 [model], [[symmetry]]
+[model] => [[model]] @ 1:1 write a table with the keys title
+title = => titel = @ 2:1 did you mean "title"?
+"Quarks" => 3 @ 2:9 text in quotation marks
+"Quarks" => Quarks @ 2:9 in quotation marks
+"Quarks" => "Quarks @ 2:16 in quotation marks
+"Quarks" => "" @ 2:9 "Standard Model"
+"Quarks" => """\nQuarks\n""" @ 2:9 write one line
+title = "Quarks" => title @ 2:6 title = "Standard Model"
+title = "Quarks" => title = "a"\ntitle = "b" @ 3:1 write each key once
+supersymmetric => suppersymetric @ 3:1 did you mean "supersymmetric"?
+supersymmetric = false => supersymmetric = "no" @ 3:18 = true, or leave it out
+supersymmetric = false => supersymmetric = true @ 19:9 "chiral superfield"
+supersymmetric = false => hypercharge = "weak" @ 3:15 the label of a gauged U(1)
+supersymmetric = false => hypercharge = "hyper charge" @ 3:15 mean "hypercharge"?
+supersymmetric = false => hypercharge = 1 @ 3:15 text in quotation marks
+supersymmetric = false => source = 1982 @ 3:10 text in quotation marks
+supersymmetric = false => notes = ["a"] @ 3:9 text in quotation marks
+"#,
+    );
 }
 
 #[test]
 fn symmetries() {
-    check(&[
-        Case(
-            "[[symmetry]]",
-            "[[symetry]]",
-            4,
-            3,
-            "did you mean \"symmetry\"?",
-        ),
-        Case(
-            "[[symmetry]]",
-            "[symmetry]",
-            7,
-            3,
-            "[[multiplet]] in double brackets each time",
-        ),
-        Case("[[symmetry]]", "[[symmetry]", 4, 12, "[[symmetry]]"),
-        Case("label = \"colour\"\n", "", 4, 1, "write label = \"colour\""),
-        Case(
-            "label = \"colour\"",
-            "lable = \"colour\"",
-            5,
-            1,
-            "did you mean \"label\"?",
-        ),
-        Case(
-            "label = \"colour\"",
-            "label = \"weak\"",
-            8,
-            9,
-            "a label of its own",
-        ),
-        Case(
-            "label = \"colour\"",
-            "label = \"\"",
-            5,
-            9,
-            "write a name of one line",
-        ),
-        Case(
-            "label = \"colour\"",
-            "label = \"gravity\"",
-            5,
-            9,
-            "choose another label",
-        ),
-        Case(
-            "label = \"colour\"",
-            "label = 3",
-            5,
-            9,
-            "text in quotation marks",
-        ),
-        Case(
-            "algebra = \"SU(3)\"\n",
-            "",
-            4,
-            1,
-            "write algebra = \"SU(3)\"",
-        ),
-        Case(
-            "algebra = \"SU(3)\"",
-            "group = \"SU(3)\"",
-            6,
-            1,
-            "\"algebra\"",
-        ),
-        Case("\"SU(3)\"", "\"SV(3)\"", 6, 11, "write SU(N), SO(N)"),
-        Case("\"SU(3)\"", "SU(3)", 6, 11, "in quotation marks"),
-        Case("\"SU(3)\"", "3", 6, 11, "such as \"SU(3)\""),
-        Case("\"SU(3)\"", "[\"SU(3)\"]", 6, 11, "such as \"SU(3)\""),
-        Case(
-            "\"SU(3)\"",
-            "\"SU(3) x SU(2)\"",
-            6,
-            11,
-            "one symmetry for each factor",
-        ),
-        Case("\"SU(3)\"", "\"SO(4)\"", 6, 11, "SU(2) x SU(2)"),
-        Case("\"SU(3)\"", "\"SU(1000000)\"", 6, 11, "SU(257)"),
-        Case("\"SU(3)\"", "\"Z(1)\"", 6, 11, "write Z(2) or larger"),
-        Case(
-            "\"SU(3)\"",
-            "\"SU(5)\"",
-            21,
-            25,
-            "5 = (1000), 5bar = (0001)",
-        ),
-        Case(
-            "global = false",
-            "global = \"yes\"",
-            13,
-            10,
-            "write global = true",
-        ),
-        Case(
-            "global = false",
-            "globl = true",
-            13,
-            1,
-            "did you mean \"global\"?",
-        ),
-    ]);
+    check(
+        r#"
+[[symmetry]] => [[symetry]] @ 4:3 did you mean "symmetry"?
+[[symmetry]] => [symmetry] @ 7:3 [[multiplet]] in double brackets each time
+[[symmetry]] => [[symmetry] @ 4:12 [[symmetry]]
+label = "colour"\n =>  @ 4:1 write label = "colour"
+label = "colour" => lable = "colour" @ 5:1 did you mean "label"?
+label = "colour" => label = "weak" @ 8:9 a label of its own
+label = "colour" => label = "" @ 5:9 write a name of one line
+label = "colour" => label = "gravity" @ 5:9 choose another label
+label = "colour" => label = 3 @ 5:9 text in quotation marks
+algebra = "SU(3)"\n =>  @ 4:1 write algebra = "SU(3)"
+algebra = "SU(3)" => group = "SU(3)" @ 6:1 "algebra"
+"SU(3)" => "SV(3)" @ 6:11 write SU(N), SO(N)
+"SU(3)" => SU(3) @ 6:11 in quotation marks
+"SU(3)" => 3 @ 6:11 such as "SU(3)"
+"SU(3)" => ["SU(3)"] @ 6:11 such as "SU(3)"
+"SU(3)" => "SU(3) x SU(2)" @ 6:11 one symmetry for each factor
+"SU(3)" => "SO(4)" @ 6:11 SU(2) x SU(2)
+"SU(3)" => "SU(1000000)" @ 6:11 SU(257)
+"SU(3)" => "Z(1)" @ 6:11 write Z(2) or larger
+"SU(3)" => "SU(5)" @ 21:25 5 = (1000), 5bar = (0001)
+global = false => global = "yes" @ 13:10 write global = true
+global = false => globl = true @ 13:1 did you mean "global"?
+"#,
+    );
 }
 
 #[test]
 fn multiplets() {
-    check(&[
-        Case(
-            "[[multiplet]]",
-            "[[multiplets]]",
-            17,
-            3,
-            "did you mean \"multiplet\"?",
-        ),
-        Case(
-            "[[multiplet]]",
-            "[multiplet]",
-            17,
-            1,
-            "[[multiplet]] in double brackets",
-        ),
-        Case(
-            "label = \"quark doublet\"\n",
-            "",
-            17,
-            1,
-            "write label = \"quark doublet\"",
-        ),
-        Case(
-            "label = \"quark doublet\"",
-            "label = \"a\\nb\"",
-            18,
-            9,
-            "a name of one line",
-        ),
-        Case(
-            "label = \"quark doublet\"",
-            "name = \"q\"",
-            18,
-            1,
-            "\"label\"",
-        ),
-        Case(
-            "field = \"left-handed fermion\"\n",
-            "",
-            17,
-            1,
-            "write field = \"left-handed fermion\"",
-        ),
-        Case(
-            "\"left-handed fermion\"",
-            "\"left fermion\"",
-            19,
-            9,
-            "mean \"left-handed fermion\"?",
-        ),
-        Case(
-            "\"left-handed fermion\"",
-            "1",
-            19,
-            9,
-            "such as \"left-handed fermion\"",
-        ),
-        Case(
-            "\"left-handed fermion\"",
-            "\"chiral superfield\"",
-            19,
-            9,
-            "declare the model supersymm",
-        ),
-        Case(
-            "\"left-handed fermion\"",
-            "\"real scalar\"",
-            21,
-            25,
-            "write \"complex scalar\"",
-        ),
-        Case("copies = 3", "copies = 0", 20, 10, "from 1 to 1000000"),
-        Case("copies = 3", "copies = -1", 20, 10, "from 1 to 1000000"),
-        Case(
-            "copies = 3",
-            "copies = 1000001",
-            20,
-            10,
-            "from 1 to 1000000",
-        ),
-        Case(
-            "copies = 3",
-            "copies = 1000000000000000000000000000000",
-            20,
-            10,
-            "from 1 to 1000000",
-        ),
-        Case("copies = 3", "copies = 1e30", 20, 10, "from 1 to 1000000"),
-        Case("copies = 3", "copies = 3.0", 20, 10, "a whole number"),
-        Case("copies = 3", "copies = \"3\"", 20, 10, "a whole number"),
-        Case(
-            "copies = 3",
-            "copies = 1979-05-27",
-            20,
-            10,
-            "a whole number",
-        ),
-        Case("copies = 3", "copies = three", 20, 10, "in quotation marks"),
-        Case("copies = 3", "copies =", 20, 9, "in quotation marks"),
-        Case(
-            "copies = 3",
-            "copies = 3\ncopies = 3",
-            21,
-            1,
-            "write each key once",
-        ),
-        Case("copies = 3", "copys = 3", 20, 1, "did you mean \"copies\"?"),
-        Case(
-            "copies = 3",
-            "family_dependent = true",
-            20,
-            20,
-            "write \"?\" as a charge",
-        ),
-        Case(
-            "copies = 3",
-            "family_dependent = 1",
-            20,
-            20,
-            "= true, or leave it out",
-        ),
-        Case("mass_gev = 1e3", "mass_gev = 0", 22, 12, "a mass above 0"),
-        Case(
-            "mass_gev = 1e3",
-            "mass_gev = -750.5",
-            22,
-            12,
-            "a mass above 0",
-        ),
-        Case("mass_gev = 1e3", "mass_gev = inf", 22, 12, "750.5 or 1e12"),
-        Case("mass_gev = 1e3", "mass_gev = nan", 22, 12, "750.5 or 1e12"),
-        Case(
-            "mass_gev = 1e3",
-            "mass_gev = 1e999999999",
-            22,
-            12,
-            "from -200 to 200",
-        ),
-        Case(
-            "mass_gev = 1e3",
-            "mass_gev = \"1e3\"",
-            22,
-            12,
-            "without quotation marks",
-        ),
-        Case(
-            "mass_gev = 1e3",
-            "mass = 1e3",
-            22,
-            1,
-            "did you mean \"mass_gev\"?",
-        ),
-    ]);
+    check(
+        r#"
+[[multiplet]] => [[multiplets]] @ 17:3 did you mean "multiplet"?
+[[multiplet]] => [multiplet] @ 17:1 [[multiplet]] in double brackets
+label = "quark doublet"\n =>  @ 17:1 write label = "quark doublet"
+label = "quark doublet" => label = "a\\nb" @ 18:9 a name of one line
+label = "quark doublet" => name = "q" @ 18:1 "label"
+field = "left-handed fermion"\n =>  @ 17:1 write field = "left-handed fermion"
+"left-handed fermion" => "left fermion" @ 19:9 mean "left-handed fermion"?
+"left-handed fermion" => 1 @ 19:9 such as "left-handed fermion"
+"left-handed fermion" => "chiral superfield" @ 19:9 declare the model supersymm
+"left-handed fermion" => "real scalar" @ 21:25 write "complex scalar"
+copies = 3 => copies = 0 @ 20:10 from 1 to 1000000
+copies = 3 => copies = -1 @ 20:10 from 1 to 1000000
+copies = 3 => copies = 1000001 @ 20:10 from 1 to 1000000
+copies = 3 => copies = 1000000000000000000000000000000 @ 20:10 from 1 to 1000000
+copies = 3 => copies = 1e30 @ 20:10 from 1 to 1000000
+copies = 3 => copies = 3.0 @ 20:10 a whole number
+copies = 3 => copies = "3" @ 20:10 a whole number
+copies = 3 => copies = 1979-05-27 @ 20:10 a whole number
+copies = 3 => copies = three @ 20:10 in quotation marks
+copies = 3 => copies = @ 20:9 in quotation marks
+copies = 3 => copies = 3\ncopies = 3 @ 21:1 write each key once
+copies = 3 => copys = 3 @ 20:1 did you mean "copies"?
+copies = 3 => family_dependent = true @ 20:20 write "?" as a charge
+copies = 3 => family_dependent = 1 @ 20:20 = true, or leave it out
+mass_gev = 1e3 => mass_gev = 0 @ 22:12 a mass above 0
+mass_gev = 1e3 => mass_gev = -750.5 @ 22:12 a mass above 0
+mass_gev = 1e3 => mass_gev = inf @ 22:12 750.5 or 1e12
+mass_gev = 1e3 => mass_gev = nan @ 22:12 750.5 or 1e12
+mass_gev = 1e3 => mass_gev = 1e999999999 @ 22:12 from -200 to 200
+mass_gev = 1e3 => mass_gev = "1e3" @ 22:12 without quotation marks
+mass_gev = 1e3 => mass = 1e3 @ 22:1 did you mean "mass_gev"?
+"#,
+    );
 }
 
 #[test]
 fn transforms() {
-    check(&[
-        Case(
-            "transforms",
-            "transform",
-            21,
-            1,
-            "did you mean \"transforms\"?",
-        ),
-        Case(
-            "transforms = {",
-            "transforms = 3 #",
-            21,
-            14,
-            "write { colour = \"3\"",
-        ),
-        Case(
-            "colour = \"3\"",
-            "color = \"3\"",
-            21,
-            16,
-            "did you mean \"colour\"?",
-        ),
-        Case(
-            "colour = \"3\"",
-            "colour = \"7\"",
-            21,
-            25,
-            "6 = (20), 6bar = (02), 8 = (11)",
-        ),
-        Case("colour = \"3\"", "colour = \"15''\"", 21, 25, "15' = (40)"),
-        Case(
-            "colour = \"3\"",
-            "colour = \"\"",
-            21,
-            25,
-            "a dimension such as 3",
-        ),
-        Case(
-            "colour = \"3\"",
-            "colour = 3",
-            21,
-            25,
-            "in quotation marks, \"3\"",
-        ),
-        Case(
-            "colour = \"3\"",
-            "colour = 3.0",
-            21,
-            25,
-            "a dimension such as 3",
-        ),
-        Case("colour = \"3\"", "colour = [1, 0]", 21, 25, "\"(1,0)\""),
-        Case(
-            "colour = \"3\"",
-            "colour = \"(1)\"",
-            21,
-            25,
-            "write 2 in brackets",
-        ),
-        Case(
-            "colour = \"3\"",
-            "colour = \"(1,-1)\"",
-            21,
-            25,
-            "whole numbers from 0",
-        ),
-        Case(
-            "colour = \"3\"",
-            "colour = \"(99999999999,0)\"",
-            21,
-            25,
-            "whole numbers from 0",
-        ),
-        Case(
-            "colour = \"3\"",
-            "colour = \"(4000000000,4000000000)\"",
-            21,
-            25,
-            "smaller irreps",
-        ),
-        Case(
-            "colour = \"3\"",
-            "colour = \"3\", colour = \"3\"",
-            21,
-            30,
-            "write each key once",
-        ),
-        Case("\"1/6\"", "\"1/0\"", 21, 56, "a fraction such as -1/3"),
-        Case(
-            "\"1/6\"",
-            "1/6",
-            21,
-            56,
-            "in quotation marks, as in algebra = \"SU(3)\" or \"1/6\"",
-        ),
-        Case("\"1/6\"", "0.5", 21, 56, "write \"1/2\""),
-        Case("\"1/6\"", "\"0.5\"", 21, 56, "write \"1/2\""),
-        Case("\"1/6\"", "nan", 21, 56, "a fraction such as -1/3"),
-        Case("\"1/6\"", "NaN", 21, 56, "in quotation marks"),
-        Case("\"1/6\"", "\"NaN\"", 21, 56, "a fraction such as -1/3"),
-        Case("\"1/6\"", "inf", 21, 56, "a fraction such as -1/3"),
-        Case("\"1/6\"", "1e999999999", 21, 56, "a fraction such as -1/3"),
-        Case("\"1/6\"", "true", 21, 56, "a charge such as \"1/6\""),
-        Case(
-            "\"1/6\"",
-            "\"one sixth\"",
-            21,
-            56,
-            "a fraction such as -1/3",
-        ),
-        Case(
-            "parity = 1",
-            "parity = \"?\"",
-            21,
-            72,
-            "write a whole number",
-        ),
-        Case("parity = 1", "parity = 0.5", 21, 72, "write a whole number"),
-        Case(
-            "parity = 1",
-            "parity = \"1/2\"",
-            21,
-            72,
-            "write a whole number",
-        ),
-    ]);
+    check(
+        r#"
+transforms => transform @ 21:1 did you mean "transforms"?
+transforms = { => transforms = 3 # @ 21:14 write { colour = "3"
+colour = "3" => color = "3" @ 21:16 did you mean "colour"?
+colour = "3" => colour = "7" @ 21:25 6 = (20), 6bar = (02), 8 = (11)
+colour = "3" => colour = "15''" @ 21:25 15' = (40)
+colour = "3" => colour = "" @ 21:25 a dimension such as 3
+colour = "3" => colour = 3 @ 21:25 in quotation marks, "3"
+colour = "3" => colour = 3.0 @ 21:25 a dimension such as 3
+colour = "3" => colour = [1, 0] @ 21:25 "(1,0)"
+colour = "3" => colour = "(1)" @ 21:25 write 2 in brackets
+colour = "3" => colour = "(1,-1)" @ 21:25 whole numbers from 0
+colour = "3" => colour = "(99999999999,0)" @ 21:25 whole numbers from 0
+colour = "3" => colour = "(4000000000,4000000000)" @ 21:25 smaller irreps
+colour = "3" => colour = "3", colour = "3" @ 21:30 write each key once
+"1/6" => "1/0" @ 21:56 a fraction such as -1/3
+"1/6" => 1/6 @ 21:56 in quotation marks, as in algebra = "SU(3)" or "1/6"
+"1/6" => 0.5 @ 21:56 write "1/2"
+"1/6" => "0.5" @ 21:56 write "1/2"
+"1/6" => nan @ 21:56 a fraction such as -1/3
+"1/6" => NaN @ 21:56 in quotation marks
+"1/6" => "NaN" @ 21:56 a fraction such as -1/3
+"1/6" => inf @ 21:56 a fraction such as -1/3
+"1/6" => 1e999999999 @ 21:56 a fraction such as -1/3
+"1/6" => true @ 21:56 a charge such as "1/6"
+"1/6" => "one sixth" @ 21:56 a fraction such as -1/3
+"1/6" => "a; \\"b" @ 21:56 a fraction such as -1/3
+"3" => "a; \\"b" @ 21:25 a dimension such as 3
+parity = 1 => parity = "?" @ 21:72 write a whole number
+parity = 1 => parity = 0.5 @ 21:72 write a whole number
+parity = 1 => parity = "1/2" @ 21:72 write a whole number
+"#,
+    );
 }
 
 #[test]
 fn electric_charge() {
-    check(&[
-        Case(
-            "[electric_charge]",
-            "[electric]",
-            23,
-            2,
-            "\"electric_charge\"",
-        ),
-        Case(
-            "[electric_charge]",
-            "[[electric_charge]]",
-            23,
-            1,
-            "write [electric_charge] with",
-        ),
-        Case(
-            "weak = [\"1/2\"]",
-            "wek = [\"1/2\"]",
-            24,
-            1,
-            "did you mean \"weak\"?",
-        ),
-        Case(
-            "weak = [\"1/2\"]",
-            "weak = [\"1/2\", \"1\"]",
-            24,
-            8,
-            "write one fraction",
-        ),
-        Case("weak = [\"1/2\"]", "weak = []", 24, 8, "write one fraction"),
-        Case("weak = [\"1/2\"]", "weak = [0.5]", 24, 9, "write \"1/2\""),
-        Case(
-            "weak = [\"1/2\"]",
-            "weak = true",
-            24,
-            8,
-            "a fraction such as \"1/2\"",
-        ),
-        Case(
-            "weak = [\"1/2\"]",
-            "colour = \"1\"",
-            24,
-            10,
-            "write 2 fractions",
-        ),
-        Case(
-            "weak = [\"1/2\"]",
-            "parity = \"1\"",
-            24,
-            1,
-            "a gauged U(1) or simple group",
-        ),
-        Case(
-            "global = false",
-            "global = true",
-            25,
-            1,
-            "a gauged U(1) or simple group",
-        ),
-        Case(
-            "hypercharge = \"1\"",
-            "hypercharge = \"1/0\"",
-            25,
-            15,
-            "such as -1/3",
-        ),
-        Case(
-            "hypercharge = \"1\"",
-            "weak = \"1\"",
-            25,
-            1,
-            "write each key once",
-        ),
-    ]);
+    check(
+        r#"
+[electric_charge] => [electric] @ 23:2 "electric_charge"
+[electric_charge] => [[electric_charge]] @ 23:1 write [electric_charge] with
+weak = ["1/2"] => wek = ["1/2"] @ 24:1 did you mean "weak"?
+weak = ["1/2"] => weak = ["1/2", "1"] @ 24:8 write one fraction
+weak = ["1/2"] => weak = [] @ 24:8 write one fraction
+weak = ["1/2"] => weak = [0.5] @ 24:9 write "1/2"
+weak = ["1/2"] => weak = true @ 24:8 a fraction such as "1/2"
+weak = ["1/2"] => colour = "1" @ 24:10 write 2 fractions
+weak = ["1/2"] => parity = "1" @ 24:1 a gauged U(1) or simple group
+global = false => global = true @ 25:1 a gauged U(1) or simple group
+hypercharge = "1" => hypercharge = "1/0" @ 25:15 such as -1/3
+hypercharge = "1" => weak = "1" @ 25:1 write each key once
+"#,
+    );
 }
 
 #[test]
@@ -648,13 +250,7 @@ fn what_is_no_model_file() {
         ),
         ("[model]\ntitle = \"Grüße\"; x", 2, 16, "in quotation marks"),
     ] {
-        let error = error(text);
-        assert_eq!(
-            (error.line(), error.column()),
-            (Some(line), Some(column)),
-            "{text:?}: {error}"
-        );
-        assert!(error.help().contains(help), "{text:?}: {error}");
+        check_place(text, line, column, help);
     }
 }
 
