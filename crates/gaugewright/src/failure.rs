@@ -23,8 +23,30 @@ pub enum Failure {
         /// What it should have been.
         what: &'static str,
     },
-    /// A file that cannot be read.
-    #[error("{} cannot be read: {why}; name a file of text, or - for standard input where it applies", .path.display())]
+    /// A charge that an answer needs and the model leaves open.
+    #[error(transparent)]
+    UnknownCharge(#[from] anomaly::UnknownCharge),
+    /// A model that is wrong.
+    #[error("model: {0}")]
+    Model(#[from] model::ModelFileError),
+    /// A model file with a mistake.
+    #[error("{}: {error}", .path.display())]
+    ModelFile {
+        /// The file.
+        path: PathBuf,
+        /// The mistake.
+        error: model::ModelFileError,
+    },
+    /// A model file that cannot be read.
+    #[error("{} cannot be read: {why}; name a model file, which is TOML text", .path.display())]
+    UnreadableModel {
+        /// The file.
+        path: PathBuf,
+        /// Why.
+        why: String,
+    },
+    /// A file of requests that cannot be read.
+    #[error("{} cannot be read: {why}; name a file of requests, or - for standard input", .path.display())]
     Unreadable {
         /// The file.
         path: PathBuf,

@@ -3,6 +3,9 @@
 //! This crate gathers the others under one roof and adds the answers and reports that the
 //! `gaugewright` command prints:
 //! - [`roots`]: simple Lie algebras and their irreps;
+//! - [`model`]: symmetries, multiplets, spectra and the model file;
+//! - [`anomaly`]: anomaly conditions and verdicts;
+//! - [`running`]: beta coefficients;
 //! - [`answer`]: what each command answers, as a value, as JSON and as a [`report::Page`];
 //! - [`request`]: what a command asks, from a terminal or a line of JSON.
 //!
@@ -14,7 +17,10 @@
 //! # Ok::<(), gaugewright::Failure>(())
 //! ```
 
+pub use anomaly;
+pub use model;
 pub use roots;
+pub use running;
 
 pub mod answer;
 mod failure;

@@ -2,13 +2,16 @@
 
 use std::fmt;
 
+use model::Model;
 use num_bigint::BigUint;
 use roots::{CatalogBound, Irrep, Numbering, SimpleAlgebra};
 use serde::Deserialize;
 use serde::de::{self, Deserializer, SeqAccess, Visitor};
 
 use crate::Failure;
-use crate::answer::{AlgebraAnswer, Answer, CATALOG_LIMIT, CatalogAnswer, IrrepAnswer};
+use crate::answer::{
+    AlgebraAnswer, AnomaliesAnswer, Answer, AuditAnswer, CATALOG_LIMIT, CatalogAnswer, IrrepAnswer,
+};
 
 /// One request; the field names are those of a line of a batch.
 #[derive(Clone, Debug, Deserialize)]
@@ -40,6 +43,17 @@ pub enum Request {
         /// How many may be listed.
         #[serde(default)]
         limit: Option<usize>,
+    },
+    /// Every anomaly condition of a model.
+    Anomalies {
+        /// The model.
+        model: ModelText,
+    },
+    /// Everything about a model.
+    Audit {
+        /// The model; the built-in demonstration unless given.
+        #[serde(default)]
+        model: Option<ModelText>,
     },
 }
 
@@ -76,6 +90,9 @@ impl Request {
                 let limit = limit.unwrap_or(CATALOG_LIMIT);
                 Box::new(CatalogAnswer::new(algebra, bound, limit, numbering)?)
             }
+            Self::Anomalies { model } => Box::new(AnomaliesAnswer::new(&model.read()?)?),
+            Self::Audit { model: None } => Box::new(AuditAnswer::new(model::demo())?),
+            Self::Audit { model: Some(model) } => Box::new(AuditAnswer::new(model.read()?)?),
         })
     }
 }
@@ -188,5 +205,29 @@ impl<'de> Deserialize<'de> for WholeText {
             serde_json::Value::String(written) => Ok(Self(written)),
             other => Err(de::Error::custom(format!("{other} is no whole number"))),
         }
+    }
+}
+
+/// A model: one that has been read, or in JSON an object of the model file's shape.
+#[derive(Clone, Debug)]
+pub enum ModelText {
+    /// A model that has been read.
+    Read(Box<Model>),
+    /// An object of the model file's shape.
+    Inline(serde_json::Value),
+}
+
+impl ModelText {
+    fn read(self) -> Result<Model, Failure> {
+        Ok(match self {
+            Self::Read(model) => *model,
+            Self::Inline(value) => Model::from_json(&value)?,
+        })
+    }
+}
+
+impl<'de> Deserialize<'de> for ModelText {
+    fn deserialize<D: Deserializer<'de>>(deserializer: D) -> Result<Self, D::Error> {
+        serde_json::Value::deserialize(deserializer).map(Self::Inline)
     }
 }

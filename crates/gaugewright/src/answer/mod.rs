@@ -2,10 +2,16 @@
 //! a [`Page`].
 
 mod algebra;
+mod anomalies;
+mod audit;
+mod audit_page;
 mod catalog;
 mod irrep;
+mod multiplets;
 
 pub use algebra::AlgebraAnswer;
+pub use anomalies::AnomaliesAnswer;
+pub use audit::AuditAnswer;
 pub use catalog::{CATALOG_LIMIT, CatalogAnswer, CatalogEntry};
 pub use irrep::IrrepAnswer;
 

@@ -9,6 +9,14 @@ use serde_json::Number;
 #[derive(Clone, Debug, PartialEq, Eq)]
 pub struct Whole(BigInt);
 
+impl Whole {
+    /// The number.
+    #[must_use]
+    pub const fn value(&self) -> &BigInt {
+        &self.0
+    }
+}
+
 impl From<BigUint> for Whole {
     fn from(value: BigUint) -> Self {
         Self(value.into())
@@ -35,6 +43,14 @@ impl Serialize for Whole {
 /// A quantity that may be a fraction: a JSON string such as `"-1/6"` or `"2"`.
 #[derive(Clone, Debug, PartialEq, Eq)]
 pub struct Exact(BigRational);
+
+impl Exact {
+    /// The number.
+    #[must_use]
+    pub const fn value(&self) -> &BigRational {
+        &self.0
+    }
+}
 
 impl From<BigRational> for Exact {
     fn from(value: BigRational) -> Self {

@@ -7,6 +7,8 @@ use gaugewright::Failure;
 use gaugewright::request::{IrrepText, Request};
 use roots::Numbering;
 
+use crate::model_input;
+
 /// From a gauge group and multiplets to an exact verdict.
 #[derive(Debug, Parser)]
 #[command(version, max_term_width = 96, propagate_version = true)]
@@ -62,6 +64,16 @@ pub(crate) enum Command {
         #[arg(long, value_name = "N")]
         limit: Option<usize>,
     },
+    /// Every anomaly condition of a model, and what each multiplet adds.
+    Anomalies {
+        /// The model file; - is standard input.
+        model: PathBuf,
+    },
+    /// Everything about a model: the verdict, why, and what the model is.
+    Audit {
+        /// The model file; - is standard input. The built-in demonstration unless given.
+        model: Option<PathBuf>,
+    },
     /// Requests as lines of JSON, one line of JSON out for each, in order.
     Batch {
         /// The file of requests; - is standard input.
@@ -88,6 +100,12 @@ impl Command {
                 max_dimension: max_dimension.map(Into::into),
                 max_index: max_index.map(Into::into),
                 limit,
+            },
+            Self::Anomalies { model } => Request::Anomalies {
+                model: model_input::read(&model)?,
+            },
+            Self::Audit { model } => Request::Audit {
+                model: model.map(|path| model_input::read(&path)).transpose()?,
             },
             Self::Batch { .. } => {
                 return Err(Failure::Request("a batch is no single request".to_owned()));

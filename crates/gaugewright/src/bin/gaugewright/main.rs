@@ -2,7 +2,9 @@
 
 mod arguments;
 mod batch;
+mod complaint;
 mod exit_status;
+mod model_input;
 mod output;
 
 use std::process::ExitCode;

@@ -8,6 +8,7 @@ use gaugewright::answer::Answer;
 use gaugewright::report::Colour;
 
 use crate::arguments::Format;
+use crate::complaint::complaint;
 use crate::exit_status::ExitStatus;
 
 /// Prints in one format.
@@ -35,7 +36,9 @@ impl Output {
     /// Says on standard error what was wrong.
     pub(crate) fn refuse(self, failure: &Failure) -> ExitStatus {
         // A standard error that is closed leaves nowhere to say it; the exit status still does.
-        let _ = writeln!(io::stderr(), "gaugewright: {failure}");
+        let stderr = io::stderr();
+        let colour = anstream::AutoStream::choice(&stderr) != ColorChoice::Never;
+        let _ = writeln!(stderr.lock(), "{}", complaint(failure, colour));
         ExitStatus::Unusable
     }
 }

@@ -1,0 +1,190 @@
+//! The main job: everything about one model in one report.
+
+use std::collections::BTreeMap;
+
+use model::{Model, Spectrum};
+use num_bigint::BigInt;
+use num_rational::BigRational;
+use running::BetaCoefficient;
+use serde::Serialize;
+
+use super::anomalies::AnomaliesAnswer;
+use super::multiplets::{MultipletAnswer, Standing};
+use super::{Answer, audit_page};
+use crate::Failure;
+use crate::report::{Exact, Page, to_json_line};
+
+/// What `gaugewright audit` answers.
+#[derive(Clone, Debug, Serialize)]
+pub struct AuditAnswer {
+    consistent: bool,
+    model: ModelFacts,
+    symmetry: Vec<SymmetryFacts>,
+    multiplets: Vec<MultipletAnswer>,
+    degrees_of_freedom: States,
+    /// The subgroup of the centre that acts trivially, e.g. "Z6".
+    trivially_acting_center: Option<String>,
+    anomalies: AnomaliesAnswer,
+    running: RunningFacts,
+    /// Not worked out by this version.
+    embeddings: Option<()>,
+    /// Not worked out by this version.
+    couplings: Option<()>,
+    #[serde(skip)]
+    of: Model,
+    #[serde(skip)]
+    standings: Vec<Standing>,
+    #[serde(skip)]
+    coefficients: Vec<BetaCoefficient>,
+}
+
+#[derive(Clone, Debug, Serialize)]
+struct ModelFacts {
+    title: String,
+    supersymmetric: bool,
+    #[serde(skip_serializing_if = "Option::is_none")]
+    source: Option<String>,
+    #[serde(skip_serializing_if = "Option::is_none")]
+    notes: Option<String>,
+}
+
+#[derive(Clone, Debug, Serialize)]
+struct SymmetryFacts {
+    label: String,
+    algebra: String,
+    gauged: bool,
+}
+
+#[derive(Clone, Debug, Serialize)]
+struct States {
+    fermionic: u128,
+    bosonic: u128,
+}
+
+#[derive(Clone, Debug, Serialize)]
+struct RunningFacts {
+    loops: u8,
+    /// By label; hypercharge in unified normalisation.
+    one_loop: BTreeMap<String, Exact>,
+    asymptotically_free: BTreeMap<String, bool>,
+    /// k in alpha_1 = k alpha_Y, where the model has a hypercharge.
+    #[serde(skip_serializing_if = "Option::is_none")]
+    hypercharge_normalisation: Option<Exact>,
+}
+
+/// k of SU(5), in which hypercharge is given unless stated otherwise ([Georgi-Quinn-Weinberg
+/// 1974]).
+pub(super) fn unified_normalisation() -> BigRational {
+    BigRational::new(BigInt::from(5), BigInt::from(3))
+}
+
+impl AuditAnswer {
+    /// Everything about `model`.
+    ///
+    /// # Errors
+    /// [`Failure::UnknownCharge`] where a charge is written `"?"`.
+    pub fn new(model: Model) -> Result<Self, Failure> {
+        let anomalies = AnomaliesAnswer::new(&model)?;
+        let coefficients = running::one_loop(&model);
+        let standings = Standing::all(model.spectrum());
+        let states = model.degrees_of_freedom();
+        Ok(Self {
+            consistent: anomalies.is_consistent(),
+            model: ModelFacts {
+                title: model.title().to_owned(),
+                supersymmetric: model.is_supersymmetric(),
+                source: model.source().map(str::to_owned),
+                notes: model.notes().map(str::to_owned),
+            },
+            symmetry: symmetry_facts(model.spectrum()),
+            multiplets: MultipletAnswer::all(&model, &standings),
+            degrees_of_freedom: States {
+                fermionic: states.fermionic,
+                bosonic: states.bosonic,
+            },
+            trivially_acting_center: model
+                .spectrum()
+                .trivially_acting_center()
+                .map(|group| group.to_string()),
+            anomalies,
+            running: running_facts(&model, &coefficients),
+            embeddings: None,
+            couplings: None,
+            standings,
+            coefficients,
+            of: model,
+        })
+    }
+
+    pub(super) const fn model(&self) -> &Model {
+        &self.of
+    }
+
+    pub(super) const fn anomalies(&self) -> &AnomaliesAnswer {
+        &self.anomalies
+    }
+
+    pub(super) fn multiplets(&self) -> &[MultipletAnswer] {
+        &self.multiplets
+    }
+
+    pub(super) fn standings(&self) -> &[Standing] {
+        &self.standings
+    }
+
+    pub(super) fn coefficients(&self) -> &[BetaCoefficient] {
+        &self.coefficients
+    }
+
+    pub(super) fn center(&self) -> Option<&str> {
+        self.trivially_acting_center.as_deref()
+    }
+}
+
+fn symmetry_facts(spectrum: &Spectrum) -> Vec<SymmetryFacts> {
+    let facts = spectrum.symmetries().iter().map(|symmetry| SymmetryFacts {
+        label: symmetry.label().to_owned(),
+        algebra: symmetry.group().to_string(),
+        gauged: symmetry.is_gauged(),
+    });
+    facts.collect()
+}
+
+fn running_facts(model: &Model, coefficients: &[BetaCoefficient]) -> RunningFacts {
+    let label = |one: &BetaCoefficient| {
+        model.spectrum().symmetries()[one.symmetry()]
+            .label()
+            .to_owned()
+    };
+    let values = coefficients.iter().filter_map(|one| {
+        let value = one.value()?;
+        let unified = match model.hypercharge() {
+            Some(place) if place == one.symmetry() => value / unified_normalisation(),
+            _ => value,
+        };
+        Some((label(one), unified.into()))
+    });
+    let free = coefficients
+        .iter()
+        .filter_map(|one| Some((label(one), one.is_asymptotically_free()?)));
+    RunningFacts {
+        loops: 1,
+        one_loop: values.collect(),
+        asymptotically_free: free.collect(),
+        hypercharge_normalisation: model.hypercharge().map(|_| unified_normalisation().into()),
+    }
+}
+
+impl Answer for AuditAnswer {
+    fn json(&self) -> String {
+        to_json_line(self).expect("names and numbers have a JSON form")
+    }
+
+    fn page(&self) -> Page {
+        audit_page::lay_out(self)
+    }
+
+    fn is_refusal(&self) -> bool {
+        !self.consistent
+    }
+}

@@ -1,0 +1,170 @@
+//! The multiplets of a model as an audit shows them.
+
+use std::collections::BTreeMap;
+
+use model::{FermionClass, Model, Multiplet, Spectrum};
+use roots::Reality;
+use serde::Serialize;
+
+use crate::report::Exact;
+
+/// One multiplet.
+#[derive(Clone, Debug, Serialize)]
+pub(super) struct MultipletAnswer {
+    label: String,
+    field: &'static str,
+    copies: u32,
+    /// Irrep name or charge by the label of the symmetry.
+    transforms: BTreeMap<String, String>,
+    /// Dynkin labels by the label of the symmetry.
+    labels: BTreeMap<String, Vec<u32>>,
+    /// Of one copy.
+    dimension: u64,
+    /// Electric charges of its states, where the model has an electric charge.
+    #[serde(skip_serializing_if = "Option::is_none")]
+    electric_charges: Option<Vec<ChargeOfStates>>,
+    /// "chiral", "vector-like", "real" or "partly chiral"; none for scalars.
+    #[serde(skip_serializing_if = "Option::is_none")]
+    chirality: Option<&'static str>,
+    /// With whom it pairs up.
+    #[serde(skip_serializing_if = "Vec::is_empty")]
+    partners: Vec<String>,
+    #[serde(skip_serializing_if = "Option::is_none")]
+    mass_gev: Option<Exact>,
+}
+
+#[derive(Clone, Debug, Serialize)]
+pub(super) struct ChargeOfStates {
+    charge: Exact,
+    states: crate::report::Whole,
+}
+
+impl MultipletAnswer {
+    /// Every multiplet of `model`.
+    pub(super) fn all(model: &Model, standings: &[Standing]) -> Vec<Self> {
+        let multiplets = model.spectrum().multiplets().iter().enumerate();
+        multiplets
+            .map(|(place, multiplet)| Self::new(model, multiplet, standings.get(place)))
+            .collect()
+    }
+
+    fn new(model: &Model, multiplet: &Multiplet, standing: Option<&Standing>) -> Self {
+        let symmetries = || model.spectrum().symmetries().iter().enumerate();
+        let labels = symmetries().filter_map(|(place, symmetry)| {
+            let irrep = multiplet.irrep(place)?;
+            Some((symmetry.label().to_owned(), irrep.labels().to_vec()))
+        });
+        let transforms = symmetries().map(|(place, symmetry)| {
+            (
+                symmetry.label().to_owned(),
+                multiplet.transformation(place).to_string(),
+            )
+        });
+        let charges = model.electric_charges(multiplet);
+        Self {
+            label: multiplet.label().to_owned(),
+            field: multiplet.field().name(),
+            copies: multiplet.copies(),
+            transforms: transforms.collect(),
+            labels: labels.collect(),
+            dimension: multiplet.dimension(),
+            electric_charges: charges.map(|charges| {
+                let states = charges.into_iter().rev();
+                let states = states.map(|(charge, states)| ChargeOfStates {
+                    charge: charge.into(),
+                    states: states.into(),
+                });
+                states.collect()
+            }),
+            chirality: standing.and_then(Standing::name),
+            partners: standing
+                .map(|one| one.partner_labels(model.spectrum()))
+                .unwrap_or_default(),
+            mass_gev: multiplet.mass_gev().cloned().map(Exact::from),
+        }
+    }
+
+    /// Electric charges, highest first.
+    pub(super) fn electric_charges(&self) -> impl Iterator<Item = &Exact> {
+        self.electric_charges
+            .iter()
+            .flatten()
+            .map(|one| &one.charge)
+    }
+}
+
+/// Whether the gauge symmetries let a multiplet's fermions have a mass.
+#[derive(Clone, Debug, PartialEq, Eq)]
+pub(super) enum Standing {
+    /// It has no fermions, or a charge is unknown.
+    None,
+    /// No copy may have a mass.
+    Chiral,
+    /// Copies pair up with these multiplets.
+    VectorLike(Vec<usize>),
+    /// Copies pair up with these multiplets, and some of the class are left over.
+    Partly(Vec<usize>),
+    /// Each copy may have a mass by itself.
+    Real,
+}
+
+impl Standing {
+    /// One for each multiplet.
+    pub(super) fn all(spectrum: &Spectrum) -> Vec<Self> {
+        let mut standings = vec![Self::None; spectrum.multiplets().len()];
+        for class in spectrum.fermion_classes().into_iter().flatten() {
+            for &place in class.members() {
+                standings[place] = Self::within(&class, place, class.conjugate_members());
+            }
+            for &place in class.conjugate_members() {
+                standings[place] = Self::within(&class, place, class.members());
+            }
+        }
+        standings
+    }
+
+    fn within(class: &FermionClass, place: usize, opposite: &[usize]) -> Self {
+        match (class.reality(), class.massive(), class.chiral()) {
+            (Reality::Real, ..) => Self::Real,
+            (_, 0, _) => Self::Chiral,
+            (Reality::Pseudoreal, _, left) => {
+                let others = class
+                    .members()
+                    .iter()
+                    .copied()
+                    .filter(|&other| other != place);
+                let others = others.collect();
+                if left == 0 {
+                    Self::VectorLike(others)
+                } else {
+                    Self::Partly(others)
+                }
+            }
+            (_, _, 0) => Self::VectorLike(opposite.to_vec()),
+            _ => Self::Partly(opposite.to_vec()),
+        }
+    }
+
+    /// The word for it in output.
+    pub(super) const fn name(&self) -> Option<&'static str> {
+        match self {
+            Self::None => None,
+            Self::Chiral => Some("chiral"),
+            Self::VectorLike(_) => Some("vector-like"),
+            Self::Partly(_) => Some("partly chiral"),
+            Self::Real => Some("real"),
+        }
+    }
+
+    pub(super) fn partner_labels(&self, spectrum: &Spectrum) -> Vec<String> {
+        match self {
+            Self::VectorLike(partners) | Self::Partly(partners) => {
+                let labels = partners
+                    .iter()
+                    .map(|&place| spectrum.multiplets()[place].label());
+                labels.map(str::to_owned).collect()
+            }
+            Self::None | Self::Chiral | Self::Real => Vec::new(),
+        }
+    }
+}
