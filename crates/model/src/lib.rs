@@ -41,6 +41,7 @@ mod error;
 mod field;
 mod file;
 mod group;
+mod irrep_memo;
 mod label;
 mod model;
 mod multiplet;

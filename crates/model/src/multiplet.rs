@@ -5,6 +5,7 @@ use num_rational::BigRational;
 use num_traits::ToPrimitive;
 use roots::{Irrep, Reality};
 
+use crate::irrep_memo::{IrrepMemo, IrrepNumbers, whole};
 use crate::{Field, MultipletDraft, Problem, Symmetry, Transformation};
 
 /// Copies that a multiplet may have.
@@ -35,42 +36,22 @@ pub struct Multiplet {
 #[derive(Clone, Debug, PartialEq, Eq)]
 struct Under {
     transformation: Transformation,
-    dimension: u64,
-    dynkin_index: u64,
-    cubic_index: i64,
+    numbers: IrrepNumbers,
     scaled_charge: Option<i64>,
 }
 
 impl Under {
-    fn new(transformation: Transformation) -> Result<Self, Problem> {
-        let (dimension, dynkin_index, cubic_index) = match &transformation {
-            Transformation::Irrep(irrep) if !irrep.is_singlet() => numbers_of(irrep)?,
-            _ => (1, 0, 0),
+    fn new(transformation: Transformation, memo: &mut IrrepMemo) -> Result<Self, Problem> {
+        let numbers = match &transformation {
+            Transformation::Irrep(irrep) => memo.numbers(irrep)?,
+            _ => IrrepNumbers::TRIVIAL,
         };
         Ok(Self {
             transformation,
-            dimension,
-            dynkin_index,
-            cubic_index,
+            numbers,
             scaled_charge: None,
         })
     }
-}
-
-/// Dimension, Dynkin index and cubic index.
-fn numbers_of(irrep: &Irrep) -> Result<(u64, u64, i64), Problem> {
-    let dimension = whole(&irrep.dimension(), "the dimension")?;
-    let dynkin_index = whole(&irrep.dynkin_index(), "the Dynkin index")?;
-    let cubic_index = irrep.cubic_index().to_i64().filter(|&a| a != i64::MIN);
-    let cubic_index = cubic_index.ok_or(Problem::TooLarge {
-        quantity: "the cubic index",
-    })?;
-    Ok((dimension, dynkin_index, cubic_index))
-}
-
-fn whole(value: &BigUint, quantity: &'static str) -> Result<u64, Problem> {
-    let small = value.to_u64().filter(|&value| i64::try_from(value).is_ok());
-    small.ok_or(Problem::TooLarge { quantity })
 }
 
 impl Multiplet {
@@ -84,9 +65,11 @@ impl Multiplet {
         draft: MultipletDraft,
         mass_gev: Option<BigRational>,
         transformations: Vec<Transformation>,
+        memo: &mut IrrepMemo,
     ) -> Result<Self, (Option<usize>, Problem)> {
         let under = transformations.into_iter().enumerate();
-        let under = under.map(|(i, one)| Under::new(one).map_err(|problem| (Some(i), problem)));
+        let under =
+            under.map(|(i, one)| Under::new(one, memo).map_err(|problem| (Some(i), problem)));
         let mut multiplet = Self {
             label: draft.label,
             field: draft.field,
@@ -106,7 +89,7 @@ impl Multiplet {
     }
 
     fn checked_dimension(&self) -> Result<u64, Problem> {
-        let dimensions = self.under.iter().map(|under| under.dimension);
+        let dimensions = self.under.iter().map(|under| under.numbers.dimension);
         let product: BigUint = dimensions.map(BigUint::from).product();
         whole(&(&product * self.copies), "the dimension times the copies")?;
         whole(&product, "the dimension")
@@ -115,11 +98,12 @@ impl Multiplet {
     /// Index times copies and the dimensions under the other symmetries, each within 63 bits.
     fn check_indices(&self) -> Result<(), (usize, Problem)> {
         for (i, under) in self.under.iter().enumerate() {
-            let others = BigUint::from(self.dimension / under.dimension * u64::from(self.copies));
+            let others =
+                BigUint::from(self.dimension / under.numbers.dimension * u64::from(self.copies));
             let indices = [
-                (under.dynkin_index, "the Dynkin index of all copies"),
+                (under.numbers.dynkin_index, "the Dynkin index of all copies"),
                 (
-                    under.cubic_index.unsigned_abs(),
+                    under.numbers.cubic_index.unsigned_abs(),
                     "the cubic index of all copies",
                 ),
             ];
@@ -226,19 +210,19 @@ impl Multiplet {
     /// Its dimension under one symmetry; 1 for U(1) and Z(N).
     #[must_use]
     pub fn dimension_under(&self, symmetry: usize) -> u64 {
-        self.under[symmetry].dimension
+        self.under[symmetry].numbers.dimension
     }
 
     /// The Dynkin index of its irrep under one symmetry; 0 for singlets, U(1) and Z(N).
     #[must_use]
     pub fn dynkin_index_under(&self, symmetry: usize) -> u64 {
-        self.under[symmetry].dynkin_index
+        self.under[symmetry].numbers.dynkin_index
     }
 
     /// The cubic index of its irrep under one symmetry, as written, not in the left-handed view.
     #[must_use]
     pub fn cubic_index_under(&self, symmetry: usize) -> i64 {
-        self.under[symmetry].cubic_index
+        self.under[symmetry].numbers.cubic_index
     }
 
     /// Its charge times [`Spectrum::charge_denominator`](crate::Spectrum::charge_denominator), as

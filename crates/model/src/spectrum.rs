@@ -6,6 +6,7 @@ use num_bigint::BigInt;
 use num_integer::Integer;
 use num_traits::ToPrimitive;
 
+use crate::irrep_memo::IrrepMemo;
 use crate::suggestion::Choice;
 use crate::{
     Error, Field, Group, MOST_COPIES, Multiplet, MultipletDraft, Owner, Part, Problem, Symmetry,
@@ -39,6 +40,7 @@ pub struct Spectrum {
     places: HashMap<String, usize>,
     /// One per symmetry.
     denominators: Vec<Denominator>,
+    memo: IrrepMemo,
 }
 
 /// The common denominator of the charges under one symmetry.
@@ -77,6 +79,7 @@ impl Spectrum {
             denominators: denominators.collect(),
             multiplets: Vec::new(),
             places: HashMap::new(),
+            memo: IrrepMemo::default(),
             symmetries,
         })
     }
@@ -100,7 +103,7 @@ impl Spectrum {
         Ok(self)
     }
 
-    fn check(&self, mut draft: MultipletDraft) -> Result<Multiplet, (Part, Box<Problem>)> {
+    fn check(&mut self, mut draft: MultipletDraft) -> Result<Multiplet, (Part, Box<Problem>)> {
         if self.multiplets.len() == MOST_MULTIPLETS {
             return Err((Part::Whole, Problem::TooManyMultiplets.into()));
         }
@@ -120,7 +123,7 @@ impl Spectrum {
             return Err((Part::FamilyDependent, Problem::NoUnknownCharge.into()));
         }
         let under = |i: usize| Part::Under(self.symmetries[i].label().to_owned());
-        let multiplet = Multiplet::new(draft, mass, transformations)
+        let multiplet = Multiplet::new(draft, mass, transformations, &mut self.memo)
             .map_err(|(place, problem)| (place.map_or(Part::Whole, under), problem.into()))?;
         if multiplet.field() == Field::RealScalar {
             let reality = multiplet.check_reality(&self.symmetries);
@@ -131,7 +134,7 @@ impl Spectrum {
 
     /// One transformation per symmetry, in order.
     fn transformations(
-        &self,
+        &mut self,
         draft: &mut MultipletDraft,
     ) -> Result<Vec<Transformation>, (Part, Box<Problem>)> {
         let mut found = vec![None; self.symmetries.len()];
@@ -148,7 +151,7 @@ impl Spectrum {
                     Problem::Repeated { symmetry }.into(),
                 ));
             }
-            match written.read(self.symmetries[i].group()) {
+            match written.read(self.symmetries[i].group(), &mut self.memo) {
                 Ok(transformation) => found[i] = Some(transformation),
                 Err(problem) => return Err((Part::Under(label), problem.into())),
             }

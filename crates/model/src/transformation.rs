@@ -8,6 +8,7 @@ use num_rational::BigRational;
 use num_traits::{ToPrimitive, Zero};
 use roots::Irrep;
 
+use crate::irrep_memo::IrrepMemo;
 use crate::suggestion::shortened;
 use crate::{CyclicOrder, Group, Problem, read_decimal};
 
@@ -77,10 +78,14 @@ pub enum Written {
 
 impl Written {
     /// What it is under `group`.
-    pub(crate) fn read(self, group: Group) -> Result<Transformation, Problem> {
+    pub(crate) fn read(
+        self,
+        group: Group,
+        memo: &mut IrrepMemo,
+    ) -> Result<Transformation, Problem> {
         match group {
             Group::Simple(algebra) => match self {
-                Self::Text(written) => Ok(Transformation::Irrep(algebra.read_irrep(&written)?)),
+                Self::Text(written) => memo.read(algebra, &written).map(Transformation::Irrep),
                 Self::Irrep(irrep) if irrep.algebra() == algebra => {
                     Ok(Transformation::Irrep(irrep))
                 }

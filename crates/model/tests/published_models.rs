@@ -172,6 +172,34 @@ fn the_demonstration_is_the_example() {
     assert_eq!(model::demo().spectrum().multiplets().len(), 17);
 }
 
+/// Every key of every example misspelt in turn: the error is on that line and says which key was
+/// meant. Every line left out in turn: read or refused, never a panic.
+#[test]
+fn every_line_of_every_example_broken() {
+    for (name, text, _) in models(&directory()) {
+        let lines: Vec<&str> = text.lines().collect();
+        for (i, line) in lines
+            .iter()
+            .enumerate()
+            .filter(|(_, line)| !line.starts_with('#'))
+        {
+            let with = |line: &str| [&lines[..i], &[line], &lines[i + 1..]].concat().join("\n");
+            let _ = Model::from_toml(&with(""));
+            let Some((key, rest)) = line.split_once(" = ") else {
+                continue;
+            };
+            let error = Model::from_toml(&with(&format!("x{key} = {rest}"))).unwrap_err();
+            assert_eq!(
+                (error.line(), error.column()),
+                (Some(i + 1), Some(1)),
+                "{name}: {error}"
+            );
+            let meant = format!("did you mean \"{key}\"?");
+            assert!(error.help().contains(&meant), "{name}: {error}");
+        }
+    }
+}
+
 /// The weights of an irrep whose weights are one Weyl orbit, as those of all fermions here are.
 fn weights(irrep: &roots::Irrep) -> Vec<Vec<i64>> {
     let cartan = irrep.algebra().cartan_matrix();
