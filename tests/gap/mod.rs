@@ -1,0 +1,1 @@
+//! GAP, a general-purpose algebra system, asked live.

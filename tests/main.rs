@@ -1,0 +1,4 @@
+//! One binary for all checks: what it holds the library to is told by the module's name.
+
+mod published;
+mod support;

@@ -1,0 +1,6 @@
+//! Tables and formulas in print.
+
+mod bourbaki_plates;
+mod cubic_indices;
+mod reality_facts;
+mod slansky_irreps;
