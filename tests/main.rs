@@ -1,4 +1,5 @@
 //! One binary for all checks: what it holds the library to is told by the module's name.
 
+mod gap;
 mod published;
 mod support;

@@ -29,3 +29,14 @@ pub(crate) fn irrep(algebra: SimpleAlgebra, labels: &[i64]) -> Irrep {
     let labels: Vec<u32> = labels.iter().map(|&l| l.try_into().unwrap()).collect();
     algebra.irrep(&labels).unwrap()
 }
+
+/// The seed of random choices: the variable `GAUGEWRIGHT_SEED`, or else another one each time. It
+/// is printed, so that a failure shows how to have the same choices again.
+pub(crate) fn seed() -> u64 {
+    let seed = match std::env::var("GAUGEWRIGHT_SEED") {
+        Ok(written) => written.parse().expect("GAUGEWRIGHT_SEED is a whole number"),
+        Err(_) => fastrand::u64(..),
+    };
+    println!("seed: GAUGEWRIGHT_SEED={seed}");
+    seed
+}
