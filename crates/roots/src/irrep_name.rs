@@ -19,8 +19,8 @@ use std::fmt;
 use num_bigint::BigUint;
 
 use crate::congruency::{Congruency, congruency};
-use crate::dimension_search::DimensionSearch;
-use crate::{CartanType, Family, Irrep, SimpleAlgebra};
+use crate::dimension_search::irreps_of_dimension;
+use crate::{CartanType, CatalogBound, Error, Family, Irrep, SimpleAlgebra};
 
 /// The dimension up to which irreps have names; beyond it they go by their labels.
 pub const NAMED_UP_TO: u32 = 1_000_000_000;
@@ -72,7 +72,7 @@ impl fmt::Display for IrrepName {
 /// ```
 #[derive(Clone, Debug)]
 pub struct NameBook {
-    search: DimensionSearch,
+    algebra: SimpleAlgebra,
     /// Irreps of each dimension looked at, in the order of a listing.
     known: HashMap<BigUint, Vec<Irrep>>,
 }
@@ -82,9 +82,34 @@ impl NameBook {
     #[must_use]
     pub fn new(algebra: SimpleAlgebra) -> Self {
         Self {
-            search: DimensionSearch::new(algebra),
+            algebra,
             known: HashMap::new(),
         }
+    }
+
+    /// Looks at every dimension up to `dimension` at once, which is faster than one at a time
+    /// where many irreps are to be named.
+    ///
+    /// # Errors
+    /// [`Error::TooMany`] where more than `limit` irreps are that small.
+    ///
+    /// ```
+    /// use roots::{NameBook, SimpleAlgebra};
+    /// let su5: SimpleAlgebra = "SU(5)".parse()?;
+    /// let mut names = NameBook::new(su5);
+    /// names.learn_up_to(&1000u32.into(), 10_000)?;
+    /// assert_eq!(names.name(&su5.irrep(&[0, 1, 0, 1])?).to_string(), "45");
+    /// # Ok::<(), roots::Error>(())
+    /// ```
+    pub fn learn_up_to(&mut self, dimension: &BigUint, limit: usize) -> Result<(), Error> {
+        let bound = CatalogBound::Dimension(dimension.clone());
+        let all = self.algebra.irreps_within(&bound, limit)?;
+        self.known.clear();
+        for irrep in all {
+            let equals = self.known.entry(irrep.dimension()).or_default();
+            equals.push(irrep);
+        }
+        Ok(())
     }
 
     /// The name of `irrep`.
@@ -121,10 +146,14 @@ impl NameBook {
     }
 
     /// Every irrep of that dimension, by Dynkin index, then in the order of their names.
+    ///
+    /// # Cost
+    /// Some milliseconds at [`NAMED_UP_TO`]. It grows with the dimension without bound, so that far
+    /// beyond it this may take very long.
     pub fn of_dimension(&mut self, dimension: &BigUint) -> &[Irrep] {
-        let search = &self.search;
+        let algebra = self.algebra;
         self.known.entry(dimension.clone()).or_insert_with(|| {
-            let mut found = search.of_dimension(dimension);
+            let mut found = irreps_of_dimension(algebra, dimension);
             Self::sort(&mut found);
             found
         })
