@@ -33,7 +33,7 @@ impl SimpleAlgebra {
     /// SU(n).
     ///
     /// # Errors
-    /// [`Error::NoSuchType`] below n = 2, [`Error::RankTooLarge`] above [`MAX_RANK`] + 1.
+    /// [`Error::NoSuchType`] below n = 2, [`Error::RankTooLarge`] above [`MAX_RANK`](crate::MAX_RANK) + 1.
     pub fn su(n: usize) -> Result<Self, Error> {
         CartanType::new(Family::A, n.saturating_sub(1)).map(Self::new)
     }
