@@ -140,7 +140,8 @@ pub enum CatalogBound {
 impl CatalogBound {
     fn admits(&self, irrep: &Irrep) -> bool {
         let cartan_type = irrep.algebra().cartan_type();
-        let within = |most: &BigUint| dimension_at_most(cartan_type, irrep.labels(), most).is_some();
+        let within =
+            |most: &BigUint| dimension_at_most(cartan_type, irrep.labels(), most).is_some();
         match self {
             Self::Dimension(most) => within(most),
             Self::DynkinIndex(most) => {

@@ -1,6 +1,6 @@
 //! Simple Lie algebras: roots, weights, irreps and their products, in exact arithmetic.
 //!
-//! Nodes are numbered as in [Slansky 1981], Table 4; [`Numbering::Bourbaki`] translates.
+//! Nodes are numbered as in [Slansky 1981]; [`Numbering::Bourbaki`] translates.
 //! Longest root squared is 2; the index of the SU(N) fundamental is 1.
 //! ```
 //! let so10: roots::SimpleAlgebra = "SO(10)".parse()?;
@@ -37,6 +37,7 @@ mod rational;
 mod reality;
 mod reductive;
 mod root_system;
+mod text;
 mod weight_metric;
 
 pub use algebra::SimpleAlgebra;
