@@ -91,10 +91,10 @@ proptest! {
 }
 
 #[test]
-fn largest_labels_at_the_largest_rank() {
-    for name in ["A256", "B256", "C256", "D256"] {
+fn largest_labels_at_large_ranks() {
+    for name in ["A256", "B80", "C80", "D80"] {
         let algebra = crate::support::algebra(name);
-        let irrep = algebra.irrep(&vec![u32::MAX; 256]).unwrap();
+        let irrep = algebra.irrep(&vec![u32::MAX; algebra.rank()]).unwrap();
         // All labels alike: (u32::MAX + 1) to the number of positive roots.
         let power = BigUint::one() << (32 * algebra.positive_root_count());
         assert_eq!(irrep.dimension(), power, "{name}");

@@ -209,15 +209,15 @@ fn has_bar(algebra: SimpleAlgebra, slow: &SlowAlgebra, one: &Irrep) -> bool {
         return false;
     }
     let (own, conjugate) = (signed(one.labels()), signed(other.labels()));
-    if algebra.cartan_type().family() == Family::A && algebra.rank() == 2 {
-        if own == [2, 0] || own == [0, 2] {
-            return own == [0, 2];
-        }
+    if slow.letter == 'A' && (own == [2, 0] || own == [0, 2]) {
+        return own == [0, 2];
     }
     let class = |w: &[i64]| -> i64 {
         let rank = w.len();
         match (slow.letter, rank) {
-            ('A', _) => (1..).zip(w).map(|(k, l)| k * l).sum::<i64>() % (slow.rank() as i64 + 1),
+            ('A', _) => {
+                (1..).zip(w).map(|(k, l)| k * l).sum::<i64>() % (1 + i64::try_from(rank).unwrap())
+            }
             ('E', 6) => (w[0] + 2 * w[1] + w[3] + 2 * w[4]) % 3,
             // SO(10) and SO(14) are the ones here: 2 a_1 + 2 a_3 ... and the ends by themselves.
             ('D', 5) => (2 * w[0] + 2 * w[2] + 3 * w[3] + 5 * w[4]) % 4,
