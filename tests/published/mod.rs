@@ -2,5 +2,6 @@
 
 mod bourbaki_plates;
 mod cubic_indices;
+mod pdg_charges;
 mod reality_facts;
 mod slansky_irreps;

@@ -74,3 +74,29 @@ pub fn files(prefix: &str) -> Vec<String> {
     names.sort();
     names
 }
+
+/// Electric charges of quarks and leptons, as the Review of Particle Physics has them.
+#[derive(Clone, Debug, Deserialize)]
+#[serde(deny_unknown_fields)]
+pub struct ChargeTable {
+    /// The publication and its edition.
+    pub source: String,
+    /// The packages that carry it, with their versions.
+    pub packages: Vec<String>,
+    /// Quarks and leptons.
+    pub particles: Vec<ChargeEntry>,
+}
+
+/// One quark or lepton.
+#[derive(Clone, Debug, Deserialize)]
+#[serde(deny_unknown_fields)]
+pub struct ChargeEntry {
+    /// Its name in the Review.
+    pub name: String,
+    /// Its number in the Review's numbering scheme.
+    pub number: i32,
+    /// "up-type quark", "down-type quark", "neutrino" or "charged lepton".
+    pub kind: String,
+    /// Its charge in units of the positron's, as a fraction.
+    pub charge: String,
+}
