@@ -3,6 +3,7 @@
 use std::fmt;
 use std::str::FromStr;
 
+use crate::text::shortened;
 use crate::{CartanType, Error, Family, SimpleAlgebra};
 
 impl fmt::Display for SimpleAlgebra {
@@ -24,22 +25,24 @@ impl FromStr for SimpleAlgebra {
     /// Reads `SU(5)`, `so10`, `USp(4)`, `E6`, `D5`: case and brackets are optional.
     fn from_str(written: &str) -> Result<Self, Error> {
         let (series, number) = split(written).ok_or_else(|| unknown(written))?;
-        let Some(number) = number else {
-            return Err(Error::RankTooLarge {
-                written: written.trim().to_owned(),
-            });
-        };
-        Written {
-            written: written.trim(),
-            number,
+        match number {
+            Some(number) => Written { written, number }.read(&series),
+            None if SERIES.contains(&series.as_str()) => Err(Error::RankTooLarge {
+                written: shortened(written),
+            }),
+            None => Err(unknown(written)),
         }
-        .read(&series)
     }
 }
 
+/// What may stand before the number.
+const SERIES: [&str; 12] = [
+    "su", "so", "sp", "usp", "u", "a", "b", "c", "d", "e", "f", "g",
+];
+
 fn unknown(written: &str) -> Error {
     Error::UnknownAlgebra {
-        written: written.trim().to_owned(),
+        written: shortened(written),
         also: "",
     }
 }
@@ -57,8 +60,7 @@ fn split(written: &str) -> Option<(String, Option<usize>)> {
     if digits.is_empty() || !digits.bytes().all(|b| b.is_ascii_digit()) {
         return None;
     }
-    let number = digits.parse().ok().filter(|&n| n < 1_000_000);
-    Some((series.to_ascii_lowercase(), number))
+    Some((series.to_ascii_lowercase(), digits.parse().ok()))
 }
 
 /// The text and the number in it.
@@ -142,7 +144,7 @@ impl Written<'_> {
             .map(SimpleAlgebra::new)
             .map_err(|error| match error {
                 Error::RankTooLarge { .. } => Error::RankTooLarge {
-                    written: self.written.to_owned(),
+                    written: shortened(self.written),
                 },
                 other => other,
             })
@@ -150,7 +152,7 @@ impl Written<'_> {
 
     fn not_simple(&self, what: &'static str, instead: &'static str) -> Error {
         Error::NotSimple {
-            written: self.written.to_owned(),
+            written: shortened(self.written),
             what,
             instead,
         }

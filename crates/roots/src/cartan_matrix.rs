@@ -7,7 +7,7 @@ use num_integer::Integer;
 use crate::{CartanType, DynkinDiagram};
 
 /// The Cartan matrix `A[i][j] = 2 (alpha_i, alpha_j) / (alpha_j, alpha_j)`: row i holds the
-/// Dynkin labels of simple root i ([Slansky 1981], section 4).
+/// Dynkin labels of simple root i ([Slansky 1981]).
 ///
 /// ```
 /// let g2: roots::SimpleAlgebra = "G2".parse()?;
@@ -105,8 +105,8 @@ impl InverseCartanMatrix {
     }
 
     /// Gauss-Jordan elimination without fractions on `[A | 1]` ([Bareiss 1968]). No pivot is
-    /// zero, since the leading minors of a Cartan matrix are positive; the minors, and so all
-    /// entries on the way, stay below `2 * rank + 2`, far inside `i64`.
+    /// zero, since the leading minors of a Cartan matrix are positive; entries on the way are minors
+    /// of `[A | 1]`, which grow as the square of the rank at most (SU(N)'s), far inside `i64`.
     fn of(matrix: &CartanMatrix) -> Self {
         let n = matrix.rank;
         let width = 2 * n;

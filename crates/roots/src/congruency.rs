@@ -52,7 +52,7 @@ impl fmt::Display for Center {
     }
 }
 
-/// The congruency class of an irrep, [Slansky 1981], section 4 and Table 3 there.
+/// The congruency class of an irrep, [Slansky 1981].
 ///
 /// Classes add up under products. For a centre Z(N) the class is a number modulo N; for SO(4k)
 /// it is Slansky's pair, the first modulo 2, the second even and modulo 4.

@@ -1,5 +1,7 @@
 //! Weyl's dimension formula, exact at any size.
 
+use std::ops::ControlFlow;
+
 use num_bigint::BigUint;
 use num_integer::Integer;
 use num_traits::One;
@@ -14,9 +16,11 @@ use crate::{CartanType, Family, RootSystem};
 /// [Humphreys 1972], 24.3.
 pub(crate) fn dimension(cartan_type: CartanType, labels: &[u32]) -> BigUint {
     let mut product = Quotient::default();
-    for_each_factor(cartan_type, labels, |above, below| {
-        product.times(above, below)
+    let whole = for_each_factor(cartan_type, labels, |above, below| {
+        product.times(above, below);
+        ControlFlow::Continue(())
     });
+    debug_assert!(whole.is_continue());
     product.value()
 }
 
@@ -28,18 +32,50 @@ pub(crate) fn dimension(cartan_type: CartanType, labels: &[u32]) -> BigUint {
 /// weight.
 pub(crate) fn orbit_size(cartan_type: CartanType, labels: &[u32]) -> BigUint {
     let mut product = Quotient::default();
-    for_each_factor(cartan_type, labels, |above, below| {
-        if above != below {
-            product.times(below + 1, below);
-        }
+    let _ = for_each_factor(cartan_type, labels, |_, below| {
+        product.times(below + 1, below);
+        ControlFlow::Continue(())
     });
     product.value()
 }
 
-/// Calls `take` with the pairings of lambda + rho and of rho with every positive coroot; the
-/// second is the height of the coroot.
-fn for_each_factor(cartan_type: CartanType, labels: &[u32], mut take: impl FnMut(u64, u64)) {
+/// The dimension where it is at most `most`, which is found out as soon as it is passed: no
+/// factor of Weyl's formula is below one.
+pub(crate) fn dimension_at_most(
+    cartan_type: CartanType,
+    labels: &[u32],
+    most: &BigUint,
+) -> Option<BigUint> {
+    let Ok(small) = u128::try_from(most) else {
+        return Some(dimension(cartan_type, labels)).filter(|dimension| dimension <= most);
+    };
+    let mut product = Quotient::default();
+    let whole = for_each_factor(cartan_type, labels, |above, below| {
+        product.times(above, below);
+        if product.is_past(small) {
+            ControlFlow::Break(())
+        } else {
+            ControlFlow::Continue(())
+        }
+    });
+    let whole = whole.is_continue().then(|| product.value());
+    whole.filter(|dimension| dimension <= most)
+}
+
+/// Calls `take` with the pairings of lambda + rho and of rho with positive coroots until it breaks
+/// off; the second is the height of the coroot. Pairs that are equal are left out.
+fn for_each_factor(
+    cartan_type: CartanType,
+    labels: &[u32],
+    mut take: impl FnMut(u64, u64) -> ControlFlow<()>,
+) -> ControlFlow<()> {
     let shifted = labels.iter().map(|&label| i64::from(label) + 1);
+    let mut take = |above: u64, below: u64| {
+        if above == below {
+            return ControlFlow::Continue(());
+        }
+        take(above, below)
+    };
     let Some((x, rho)) = coordinates(cartan_type, shifted).zip(weyl_vector(cartan_type)) else {
         return exceptional_factors(cartan_type, labels, take);
     };
@@ -51,27 +87,33 @@ fn for_each_factor(cartan_type: CartanType, labels: &[u32], mut take: impl FnMut
     for i in 0..x.len() {
         for j in i + 1..x.len() {
             let difference = |y: &[i64]| positive(y[i] - y[j]) / unit;
-            take(difference(&x), difference(&rho));
+            take(difference(&x), difference(&rho))?;
             if family != Family::A {
                 let sum = |y: &[i64]| positive(y[i] + y[j]) / unit;
-                take(sum(&x), sum(&rho));
+                take(sum(&x), sum(&rho))?;
             }
         }
         if matches!(family, Family::B | Family::C) {
-            take(positive(x[i]) / own, positive(rho[i]) / own);
+            take(positive(x[i]) / own, positive(rho[i]) / own)?;
         }
     }
+    ControlFlow::Continue(())
 }
 
-fn exceptional_factors(cartan_type: CartanType, labels: &[u32], mut take: impl FnMut(u64, u64)) {
+fn exceptional_factors(
+    cartan_type: CartanType,
+    labels: &[u32],
+    mut take: impl FnMut(u64, u64) -> ControlFlow<()>,
+) -> ControlFlow<()> {
     for root in RootSystem::exceptional(cartan_type).positive_roots() {
         let height: u64 = root.coroot().iter().copied().map(u64::from).sum();
         let terms = root.coroot().iter().zip(labels);
         let pairing: u64 = terms
             .map(|(&c, &label)| u64::from(c) * u64::from(label))
             .sum();
-        take(pairing + height, height);
+        take(pairing + height, height)?;
     }
+    ControlFlow::Continue(())
 }
 
 /// A product of fractions: small while it can be, large when it must.
@@ -95,9 +137,6 @@ impl Default for Quotient {
 
 impl Quotient {
     fn times(&mut self, above: u64, below: u64) {
-        if above == below {
-            return;
-        }
         if self.times_small(above, below) {
             return;
         }
@@ -120,6 +159,15 @@ impl Quotient {
             return true;
         }
         false
+    }
+
+    /// Whether what has been multiplied so far is above `most`. While it cannot be told in small
+    /// numbers it is left open.
+    fn is_past(&self, most: u128) -> bool {
+        self.spilled_above.is_one()
+            && most
+                .checked_mul(self.below)
+                .is_some_and(|bound| self.above > bound)
     }
 
     fn value(self) -> BigUint {

@@ -3,53 +3,39 @@
 //! The dimension grows with every label, so both searches stop where it passes the bound.
 
 use num_bigint::BigUint;
+use num_rational::BigRational;
+use num_traits::Zero;
 
-use crate::{Error, Irrep, SimpleAlgebra, dimension};
+use crate::dimension::dimension_at_most;
+use crate::{Error, Irrep, SimpleAlgebra, index};
 
-/// Looks for the irreps of given dimensions.
+/// Every irrep of that dimension, in no particular order.
 ///
-/// Holds the nodes whose fundamental irrep is within reach, the largest first: the two smallest,
-/// which take the most values, are walked together.
-#[derive(Clone, Debug)]
-pub(crate) struct DimensionSearch {
-    algebra: SimpleAlgebra,
-    nodes: Vec<(BigUint, usize)>,
-}
-
-impl DimensionSearch {
-    pub(crate) fn new(algebra: SimpleAlgebra) -> Self {
-        let fundamental = |node| Irrep::from_fn(algebra, |i| u32::from(i == node));
-        let mut nodes: Vec<_> = (0..algebra.rank())
-            .map(|node| (fundamental(node).dimension(), node))
-            .collect();
-        nodes.sort_by(|left, right| right.cmp(left));
-        Self { algebra, nodes }
+/// The nodes whose fundamental irrep is within reach are walked the largest first: the two
+/// smallest, which take the most values, are walked together.
+///
+/// # Cost
+/// The number of irreps up to that dimension in all but two labels, times the largest values of
+/// those two: for SU(3), the worst, a few times the square root of the dimension.
+pub(crate) fn irreps_of_dimension(algebra: SimpleAlgebra, dimension: &BigUint) -> Vec<Irrep> {
+    let mut labels = vec![0; algebra.rank()];
+    let mut nodes = Vec::new();
+    for node in 0..algebra.rank() {
+        labels[node] = 1;
+        let fundamental = dimension_at_most(algebra.cartan_type(), &labels, dimension);
+        nodes.extend(fundamental.map(|fundamental| (fundamental, node)));
+        labels[node] = 0;
     }
-
-    pub(crate) const fn algebra(&self) -> SimpleAlgebra {
-        self.algebra
-    }
-
-    /// Every irrep of that dimension, in no particular order.
-    ///
-    /// # Cost
-    /// The number of irreps up to that dimension in all but two labels, times the largest values
-    /// of those two: for SU(3), the worst, a few times the square root of the dimension.
-    pub(crate) fn of_dimension(&self, dimension: &BigUint) -> Vec<Irrep> {
-        let reach = self
-            .nodes
-            .iter()
-            .filter(|(smallest, _)| smallest <= dimension);
-        let mut walk = Walk {
-            algebra: self.algebra,
-            dimension,
-            nodes: reach.map(|(_, node)| *node).collect(),
-            labels: vec![0; self.algebra.rank()],
-            found: Vec::new(),
-        };
-        walk.from(0);
-        walk.found
-    }
+    nodes.sort_by(|left, right| right.cmp(left));
+    let mut walk = Walk {
+        algebra,
+        dimension,
+        nodes: nodes.into_iter().map(|(_, node)| node).collect(),
+        labels,
+        found: Vec::new(),
+    };
+    walk.from(0);
+    walk.found
 }
 
 struct Walk<'a> {
@@ -124,16 +110,17 @@ impl Walk<'_> {
         raised.is_some()
     }
 
-    fn current(&self) -> BigUint {
-        dimension::dimension(self.algebra.cartan_type(), &self.labels)
+    /// The dimension that the labels have now, unless it is past the one looked for.
+    fn within(&self) -> Option<BigUint> {
+        dimension_at_most(self.algebra.cartan_type(), &self.labels, self.dimension)
     }
 
     fn is_past(&self) -> bool {
-        self.current() > *self.dimension
+        self.within().is_none()
     }
 
     fn keep_if_equal(&mut self) {
-        if self.current() == *self.dimension {
+        if self.within().as_ref() == Some(self.dimension) {
             let labels = &self.labels;
             self.found
                 .push(Irrep::from_fn(self.algebra, |node| labels[node]));
@@ -152,11 +139,24 @@ pub enum CatalogBound {
 
 impl CatalogBound {
     fn admits(&self, irrep: &Irrep) -> bool {
+        let cartan_type = irrep.algebra().cartan_type();
+        let within =
+            |most: &BigUint| dimension_at_most(cartan_type, irrep.labels(), most).is_some();
         match self {
-            Self::Dimension(most) => irrep.dimension() <= *most,
-            Self::DynkinIndex(most) => irrep.dynkin_index() <= *most,
+            Self::Dimension(most) => within(most),
+            Self::DynkinIndex(most) => {
+                let casimir = index::casimir(cartan_type, irrep.labels());
+                casimir.is_zero() || within(&largest_dimension(irrep.algebra(), &casimir, most))
+            }
         }
     }
+}
+
+/// The largest dimension that goes with that Casimir and a Dynkin index of at most `index`:
+/// l = 2 C2 dim(R) / dim(G).
+fn largest_dimension(algebra: SimpleAlgebra, casimir: &BigRational, index: &BigUint) -> BigUint {
+    let above = BigUint::from(algebra.dimension()) * index * casimir.denom().magnitude();
+    above / (casimir.numer().magnitude() * 2u32)
 }
 
 impl SimpleAlgebra {

@@ -1,6 +1,6 @@
 //! Dynkin diagrams: the nodes, the bonds between them and the length of each simple root.
 //!
-//! This is the one place where the node numbering of [Slansky 1981], Table 4, is written down.
+//! This is the one place where the node numbering of [Slansky 1981] is written down.
 //! The Cartan matrix follows from it, and everything else from the Cartan matrix.
 
 use crate::{CartanType, Family};
@@ -14,7 +14,7 @@ pub struct DynkinDiagram {
 }
 
 impl DynkinDiagram {
-    /// The diagram of `cartan_type` in the numbering of [Slansky 1981], Table 4.
+    /// The diagram of `cartan_type` in the numbering of [Slansky 1981].
     #[must_use]
     pub fn of(cartan_type: CartanType) -> Self {
         let n = cartan_type.rank();

@@ -93,7 +93,7 @@ pub enum Error {
     /// No irrep has that name.
     #[error(
         "{algebra} has no irrep \"{written}\"; {}",
-        join_candidates(.candidates, "there are", "none of that dimension is near; write labels")
+        join_candidates(.candidates, "it has", "none has that dimension; write labels")
     )]
     UnknownIrrep {
         /// Name of the algebra.

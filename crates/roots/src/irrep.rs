@@ -113,7 +113,7 @@ impl Irrep {
     /// The Dynkin index l: 1 for the SU(N) fundamental, 2 for the SO(N) vector from N = 5 on.
     ///
     /// # Source
-    /// [Dynkin 1957]; [Slansky 1981], section 5.
+    /// [Dynkin 1957]; [Slansky 1981].
     #[must_use]
     pub fn dynkin_index(&self) -> BigUint {
         index::dynkin_index(self.algebra, &self.casimir(), &self.dimension())

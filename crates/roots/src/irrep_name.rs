@@ -19,7 +19,7 @@ use std::fmt;
 use num_bigint::BigUint;
 
 use crate::congruency::{Congruency, congruency};
-use crate::dimension_search::DimensionSearch;
+use crate::dimension_search::irreps_of_dimension;
 use crate::{CartanType, CatalogBound, Error, Family, Irrep, SimpleAlgebra};
 
 /// The dimension up to which irreps have names; beyond it they go by their labels.
@@ -72,7 +72,7 @@ impl fmt::Display for IrrepName {
 /// ```
 #[derive(Clone, Debug)]
 pub struct NameBook {
-    search: DimensionSearch,
+    algebra: SimpleAlgebra,
     /// Irreps of each dimension looked at, in the order of a listing.
     known: HashMap<BigUint, Vec<Irrep>>,
 }
@@ -82,9 +82,32 @@ impl NameBook {
     #[must_use]
     pub fn new(algebra: SimpleAlgebra) -> Self {
         Self {
-            search: DimensionSearch::new(algebra),
+            algebra,
             known: HashMap::new(),
         }
+    }
+
+    /// Every irrep up to that dimension, as [`SimpleAlgebra::irreps_within`] lists them; the book
+    /// remembers them, so that naming each costs no search.
+    ///
+    /// # Errors
+    /// [`Error::TooMany`] where there are more than `limit`.
+    ///
+    /// ```
+    /// use roots::{NameBook, SimpleAlgebra};
+    /// let su5: SimpleAlgebra = "SU(5)".parse()?;
+    /// let mut names = NameBook::new(su5);
+    /// let all = names.up_to_dimension(&50u32.into(), 100)?;
+    /// assert_eq!((all.len(), names.name(&all[1]).to_string()), (16, "5".to_owned()));
+    /// # Ok::<(), roots::Error>(())
+    /// ```
+    pub fn up_to_dimension(&mut self, most: &BigUint, limit: usize) -> Result<Vec<Irrep>, Error> {
+        let bound = CatalogBound::Dimension(most.clone());
+        let all = self.algebra.irreps_within(&bound, limit)?;
+        for equals in all.chunk_by(|left, right| left.dimension() == right.dimension()) {
+            self.known.insert(equals[0].dimension(), equals.to_vec());
+        }
+        Ok(all)
     }
 
     /// The name of `irrep`.
@@ -121,27 +144,17 @@ impl NameBook {
     }
 
     /// Every irrep of that dimension, by Dynkin index, then in the order of their names.
+    ///
+    /// # Cost
+    /// Some milliseconds at [`NAMED_UP_TO`]. It grows with the dimension without bound, so that far
+    /// beyond it this may take very long.
     pub fn of_dimension(&mut self, dimension: &BigUint) -> &[Irrep] {
-        let search = &self.search;
+        let algebra = self.algebra;
         self.known.entry(dimension.clone()).or_insert_with(|| {
-            let mut found = search.of_dimension(dimension);
+            let mut found = irreps_of_dimension(algebra, dimension);
             Self::sort(&mut found);
             found
         })
-    }
-
-    /// Every irrep up to that dimension, as [`SimpleAlgebra::irreps_within`] lists them, and
-    /// remembers them all, so that naming each costs no search.
-    ///
-    /// # Errors
-    /// [`Error::TooMany`] where there are more than `limit`.
-    pub fn up_to_dimension(&mut self, most: &BigUint, limit: usize) -> Result<Vec<Irrep>, Error> {
-        let bound = CatalogBound::Dimension(most.clone());
-        let all = self.search.algebra().irreps_within(&bound, limit)?;
-        for equals in all.chunk_by(|left, right| left.dimension() == right.dimension()) {
-            self.known.insert(equals[0].dimension(), equals.to_vec());
-        }
-        Ok(all)
     }
 
     /// Sorts irreps of one algebra as a listing has them: by dimension, then Dynkin index, then in

@@ -2,8 +2,10 @@
 
 use num_bigint::BigUint;
 
+use crate::dimension::{dimension, dimension_at_most};
 use crate::irrep_name::NAMED_UP_TO;
-use crate::{CatalogBound, Error, Irrep, NameBook, Numbering, SimpleAlgebra};
+use crate::text::shortened;
+use crate::{CatalogBound, Error, Irrep, IrrepName, NameBook, Numbering, SimpleAlgebra};
 
 impl SimpleAlgebra {
     /// Reads an irrep of this algebra: `(1,0,0,0)`, `(1000)` while every label is one digit,
@@ -30,8 +32,10 @@ impl SimpleAlgebra {
     /// As [`read_irrep`](Self::read_irrep).
     pub fn read_irrep_in(self, numbering: Numbering, written: &str) -> Result<Irrep, Error> {
         let written = written.trim();
-        if written.starts_with('(') {
-            let labels = read_labels(self, written)?;
+        if let Some(inner) = written.strip_prefix('(') {
+            let closed = inner.strip_suffix(')');
+            let inner = closed.ok_or_else(|| self.bad_irrep(numbering, written))?;
+            let labels = read_labels(self, written, inner.trim())?;
             // The count is checked before nodes are rearranged.
             let irrep = self.irrep(&labels)?;
             let labels = numbering.to_slansky(self.cartan_type(), irrep.labels());
@@ -72,29 +76,27 @@ impl SimpleAlgebra {
             .map(|(name, irrep)| format!("{name} = {}", irrep.bracketed_in(numbering)))
             .collect();
         let (algebra, written) = (self.to_string(), shortened(written));
-        Err(if plain && !candidates.is_empty() {
-            Error::AmbiguousIrrep {
+        if plain && !candidates.is_empty() {
+            return Err(Error::AmbiguousIrrep {
                 algebra,
                 written,
                 candidates,
-            }
-        } else if candidates.is_empty() {
-            let candidates = self.nearest(numbering, &name.dimension, &mut book);
-            Error::UnknownIrrep {
-                algebra,
-                written,
-                candidates,
-            }
+            });
+        }
+        let candidates = if candidates.is_empty() {
+            self.nearest(numbering, &name.dimension, &mut book)
         } else {
-            Error::UnknownIrrep {
-                algebra,
-                written,
-                candidates,
-            }
+            candidates
+        };
+        Err(Error::UnknownIrrep {
+            algebra,
+            written,
+            candidates,
         })
     }
 
-    /// The irreps of the nearest dimensions below and above one that has none.
+    /// The irreps of the nearest dimensions below and above one that has none; empty where there
+    /// are too many irreps below it to go through.
     fn nearest(
         self,
         numbering: Numbering,
@@ -102,21 +104,45 @@ impl SimpleAlgebra {
         book: &mut NameBook,
     ) -> Vec<String> {
         const ENOUGH: usize = 20_000;
-        let bound = CatalogBound::Dimension(dimension * 4u32);
-        let Ok(all) = self.irreps_within(&bound, ENOUGH) else {
+        let bound = CatalogBound::Dimension(dimension.clone());
+        let Ok(below) = self.irreps_within(&bound, ENOUGH) else {
             return Vec::new();
         };
-        let split = all.partition_point(|irrep| irrep.dimension() < *dimension);
-        let (below, above) = all.split_at(split);
-        let near = |irrep: Option<&Irrep>| irrep.map(Irrep::dimension);
-        let (low, high) = (near(below.last()), near(above.first()));
-        let wanted = all.iter().filter(|irrep| {
-            let found = Some(irrep.dimension());
-            found == low || found == high
-        });
-        wanted
-            .map(|irrep| format!("{} = {}", book.name(irrep), irrep.bracketed_in(numbering)))
+        let low = below.last().map(Irrep::dimension);
+        let high = self.smallest_above(&below);
+        let mut candidates = Vec::new();
+        for dimension in [low, high].into_iter().flatten() {
+            candidates.extend(book.of_dimension(&dimension).to_vec());
+        }
+        candidates
+            .iter()
+            .map(|irrep| match book.name(irrep) {
+                IrrepName::Labels(_) => irrep.bracketed_in(numbering),
+                name => format!("{name} = {}", irrep.bracketed_in(numbering)),
+            })
             .collect()
+    }
+
+    /// The smallest dimension of an irrep that is not in a list of all irreps up to some other:
+    /// it has one label more than one of these.
+    fn smallest_above(self, below: &[Irrep]) -> Option<BigUint> {
+        let largest = below.last().map(Irrep::dimension);
+        let mut smallest: Option<BigUint> = None;
+        for irrep in below {
+            let mut labels = irrep.labels().to_vec();
+            for node in 0..self.rank() {
+                labels[node] = labels[node].saturating_add(1);
+                let found = match &smallest {
+                    None => Some(dimension(self.cartan_type(), &labels)),
+                    Some(most) => dimension_at_most(self.cartan_type(), &labels, most),
+                };
+                labels[node] = irrep.labels()[node];
+                smallest = found
+                    .filter(|found| Some(found) > largest.as_ref())
+                    .or(smallest);
+            }
+        }
+        smallest
     }
 }
 
@@ -166,17 +192,12 @@ const fn is_prime_mark(c: char) -> bool {
     matches!(c, '\'' | '\u{2032}' | '\u{2019}')
 }
 
-/// Labels in brackets: with commas or spaces between them, or one digit each.
-fn read_labels(algebra: SimpleAlgebra, written: &str) -> Result<Vec<u32>, Error> {
+/// The labels between brackets: with commas or spaces between them, or one digit each.
+fn read_labels(algebra: SimpleAlgebra, written: &str, inner: &str) -> Result<Vec<u32>, Error> {
     let bad = |label: &str| Error::BadLabel {
         written: shortened(written),
         label: shortened(label),
     };
-    let inner = written
-        .strip_prefix('(')
-        .and_then(|open| open.strip_suffix(')'))
-        .ok_or_else(|| bad(written))?
-        .trim();
     let read = |label: &str| {
         let digits = !label.is_empty() && label.bytes().all(|b| b.is_ascii_digit());
         let value = digits.then(|| label.parse().ok()).flatten();
@@ -186,21 +207,11 @@ fn read_labels(algebra: SimpleAlgebra, written: &str) -> Result<Vec<u32>, Error>
         inner.split(',').map(|label| read(label.trim())).collect()
     } else if inner.contains(char::is_whitespace) {
         inner.split_whitespace().map(read).collect()
-    } else if algebra.rank() == 1 {
+    } else if algebra.rank() == 1 && !inner.is_empty() {
         Ok(vec![read(inner)?])
-    } else if inner.bytes().all(|b| b.is_ascii_digit()) && !inner.is_empty() {
+    } else if inner.bytes().all(|b| b.is_ascii_digit()) {
         Ok(inner.bytes().map(|b| u32::from(b - b'0')).collect())
     } else {
         Err(bad(inner))
     }
-}
-
-/// The text, cut where it is too long to repeat in a message.
-fn shortened(written: &str) -> String {
-    const MOST: usize = 60;
-    if written.chars().count() <= MOST {
-        return written.to_owned();
-    }
-    let start: String = written.chars().take(MOST).collect();
-    format!("{start}...")
 }

@@ -1,6 +1,6 @@
 //! Simple Lie algebras: roots, weights, irreps and their products, in exact arithmetic.
 //!
-//! Nodes are numbered as in [Slansky 1981], Table 4; [`Numbering::Bourbaki`] translates.
+//! Nodes are numbered as in [Slansky 1981]; [`Numbering::Bourbaki`] translates.
 //! Longest root squared is 2; the index of the SU(N) fundamental is 1.
 //! ```
 //! let so10: roots::SimpleAlgebra = "SO(10)".parse()?;
@@ -60,6 +60,7 @@ mod reductive_product;
 mod root_system;
 mod single_multiplicity;
 mod tensor_product;
+mod text;
 #[cfg(test)]
 mod two_ways;
 mod weight;

@@ -19,7 +19,7 @@ use crate::{CartanType, Family};
 /// ```
 #[derive(Clone, Copy, Debug, Default, PartialEq, Eq, Hash)]
 pub enum Numbering {
-    /// [Slansky 1981], Table 4.
+    /// That of the diagrams of [Slansky 1981].
     #[default]
     Slansky,
     /// [Bourbaki 1968], plates I to IX.

@@ -4,7 +4,12 @@
 //! Sums over all roots become sums over pairs of coordinates, so that nothing of the size of the
 //! root system is stored. The bases are those of [Bourbaki 1968], plates I to IV.
 
+use smallvec::SmallVec;
+
 use crate::{CartanType, Family};
+
+/// One number per coordinate; no allocation up to rank 9.
+pub(crate) type Coordinates = SmallVec<[i64; 10]>;
 
 /// Coordinates of the weight with these Dynkin labels: for SU(N) the rows of its Young diagram
 /// (N of them, the last one 0), for the others *twice* the coordinates of the plates, so that
@@ -14,11 +19,11 @@ use crate::{CartanType, Family};
 pub(crate) fn coordinates(
     cartan_type: CartanType,
     labels: impl DoubleEndedIterator<Item = i64> + Clone,
-) -> Option<Vec<i64>> {
+) -> Option<Coordinates> {
     let n = cartan_type.rank();
     let sums_from_the_end = |labels: &mut dyn Iterator<Item = i64>, start: i64, step: i64| {
         let mut sum = start;
-        let mut sums: Vec<i64> = labels
+        let mut sums: Coordinates = labels
             .map(|label| {
                 sum += step * label;
                 sum
@@ -54,7 +59,7 @@ pub(crate) fn coordinates(
 }
 
 /// Coordinates of the Weyl vector rho, all of whose labels are 1, as [`coordinates`] gives them.
-pub(crate) fn weyl_vector(cartan_type: CartanType) -> Option<Vec<i64>> {
+pub(crate) fn weyl_vector(cartan_type: CartanType) -> Option<Coordinates> {
     coordinates(cartan_type, std::iter::repeat_n(1, cartan_type.rank()))
 }
 

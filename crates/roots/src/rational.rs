@@ -5,6 +5,7 @@ use num_rational::BigRational;
 use num_traits::Zero;
 
 use crate::Error;
+use crate::text::shortened;
 
 /// Digits that a numerator or denominator may have.
 const MOST_DIGITS: usize = 60;
@@ -12,7 +13,8 @@ const MOST_DIGITS: usize = 60;
 /// Reads a whole number or a fraction of two of them.
 ///
 /// # Errors
-/// [`Error::BadNumber`] for anything else: decimals, a zero denominator, over 60 digits.
+/// [`Error::BadNumber`] for anything else: decimals, a zero denominator, over 60 digits above or
+/// below.
 ///
 /// ```
 /// assert_eq!(roots::read_rational("-2/12")?.to_string(), "-1/6");
@@ -22,7 +24,7 @@ const MOST_DIGITS: usize = 60;
 /// ```
 pub fn read_rational(written: &str) -> Result<BigRational, Error> {
     let bad = || Error::BadNumber {
-        written: written.trim().chars().take(80).collect(),
+        written: shortened(written),
     };
     let (above, below) = match written.trim().split_once('/') {
         Some((above, below)) => (above.trim_end(), Some(below.trim_start())),

@@ -42,7 +42,7 @@ pub(crate) const fn conjugate_node(cartan_type: CartanType, node: usize) -> usiz
 /// `2 (lambda, rho-check)`, the number of steps from its highest to its lowest weight, is even.
 ///
 /// # Source
-/// [Bourbaki 1975], VIII.7.5; [Slansky 1981], section 4, on heights.
+/// [Bourbaki 1975], VIII.7.5; [Slansky 1981], on heights.
 pub(crate) fn reality(cartan_type: CartanType, labels: &[u32]) -> Reality {
     let conjugate = |node| labels[conjugate_node(cartan_type, node)];
     if (0..labels.len()).any(|node| labels[node] != conjugate(node)) {

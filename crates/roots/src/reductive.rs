@@ -6,6 +6,7 @@ use std::str::FromStr;
 use num_bigint::BigUint;
 use num_rational::BigRational;
 
+use crate::text::shortened;
 use crate::{Error, Irrep, SimpleAlgebra};
 
 /// One factor of a reductive algebra.
@@ -172,7 +173,7 @@ impl FromStr for ReductiveAlgebra {
         let factors = written.split(['x', 'X', '\u{d7}']);
         let factors = factors.map(|factor| {
             if factor.trim().is_empty() {
-                let written = written.trim().to_owned();
+                let written = shortened(written);
                 return Err(Error::EmptyFactor { written });
             }
             factor.parse()

@@ -8,7 +8,7 @@ use num_rational::BigRational;
 use crate::{CartanType, DynkinDiagram, Family, SimpleAlgebra};
 
 /// Inner products of fundamental weights, longest root squared 2, as whole numbers over one
-/// denominator ([Slansky 1981], Table 7: his metric tensor G).
+/// denominator ([Slansky 1981]: his metric tensor G).
 #[derive(Clone, Debug, PartialEq, Eq)]
 pub struct WeightMetric {
     rank: usize,

@@ -6,7 +6,7 @@ fn algebra(name: &str) -> SimpleAlgebra {
     name.parse().unwrap()
 }
 
-/// [Slansky 1981], Tables 10 to 13 and 20 to 53: which labels carry which name.
+/// [Slansky 1981], tables of irreps, from memory: which labels carry which name.
 #[test]
 fn slansky_names_and_labels() {
     let cases = [

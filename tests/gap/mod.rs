@@ -1,0 +1,4 @@
+//! GAP, a general-purpose algebra system, asked live.
+
+mod answers;
+mod root_systems;
