@@ -9,7 +9,13 @@ use std::path::{Path, PathBuf};
 pub enum Failure {
     /// A name, label or bound.
     #[error(transparent)]
-    Algebra(#[from] roots::Error),
+    Algebra(roots::Error),
+    /// An answer beyond a limit that can be raised.
+    #[error("{0} (--max-terms, --max-weights; max_terms, max_weights in a batch)")]
+    BeyondLimit(roots::Error),
+    /// A power whose symmetry and degree do not fit together.
+    #[error("{0}; write --degree 2 --symmetry symmetric, or a partition of the degree such as 2,1")]
+    Power(String),
     /// A line of a batch that is no request.
     #[error(
         "{0}; write one JSON object such as {{\"command\": \"irrep\", \"algebra\": \"SO(10)\", \"irrep\": \"16\"}}"
@@ -56,6 +62,15 @@ pub enum Failure {
     /// Standard output or a file that cannot be written.
     #[error("the answer cannot be written: {0}")]
     Output(io::Error),
+}
+
+impl From<roots::Error> for Failure {
+    fn from(error: roots::Error) -> Self {
+        match error {
+            error @ roots::Error::BeyondLimit { .. } => Self::BeyondLimit(error),
+            error => Self::Algebra(error),
+        }
+    }
 }
 
 impl Failure {

@@ -4,13 +4,14 @@ use std::fmt;
 
 use model::Model;
 use num_bigint::BigUint;
-use roots::{CatalogBound, Irrep, Numbering, SimpleAlgebra};
+use roots::{CatalogBound, Irrep, Limits, Numbering, SimpleAlgebra};
 use serde::Deserialize;
 use serde::de::{self, Deserializer, SeqAccess, Visitor};
 
 use crate::Failure;
 use crate::answer::{
-    AlgebraAnswer, AnomaliesAnswer, Answer, AuditAnswer, CATALOG_LIMIT, CatalogAnswer, IrrepAnswer,
+    AlgebraAnswer, AnomaliesAnswer, Answer, AuditAnswer, CATALOG_LIMIT, CatalogAnswer,
+    DecompositionAnswer, IrrepAnswer, PowerSymmetry, WeightsAsked,
 };
 
 /// One request; the field names are those of a line of a batch.
@@ -29,6 +30,43 @@ pub enum Request {
         algebra: String,
         /// Its name or labels.
         irrep: IrrepText,
+        /// Which weights are listed.
+        #[serde(default)]
+        weights: Option<WeightsAsked>,
+        /// How many weights may be listed.
+        #[serde(default)]
+        max_weights: Option<usize>,
+    },
+    /// A tensor product.
+    Product {
+        /// Name of the algebra.
+        algebra: String,
+        /// The irreps that are multiplied.
+        factors: Vec<IrrepText>,
+        /// Limits of one's own.
+        #[serde(default)]
+        max_terms: Option<usize>,
+        /// Limits of one's own.
+        #[serde(default)]
+        max_weights: Option<u64>,
+    },
+    /// The part of a tensor power with one symmetry.
+    Power {
+        /// Name of the algebra.
+        algebra: String,
+        /// The irrep.
+        irrep: IrrepText,
+        /// The degree, which a partition tells by itself.
+        #[serde(default)]
+        degree: Option<u32>,
+        /// `symmetric`, `antisymmetric` or a partition such as `2,1`.
+        symmetry: String,
+        /// Limits of one's own.
+        #[serde(default)]
+        max_terms: Option<usize>,
+        /// Limits of one's own.
+        #[serde(default)]
+        max_weights: Option<u64>,
     },
     /// Irreps up to a bound.
     Catalog {
@@ -75,9 +113,46 @@ impl Request {
             Self::Algebra { algebra } => {
                 Box::new(AlgebraAnswer::new(read_algebra(&algebra)?, numbering))
             }
-            Self::Irrep { algebra, irrep } => {
+            Self::Irrep {
+                algebra,
+                irrep,
+                weights,
+                max_weights,
+            } => {
                 let irrep = irrep.read(read_algebra(&algebra)?, numbering)?;
-                Box::new(IrrepAnswer::new(irrep, numbering))
+                Box::new(match weights {
+                    None => IrrepAnswer::new(irrep, numbering),
+                    Some(asked) => IrrepAnswer::with_weights(irrep, asked, max_weights, numbering)?,
+                })
+            }
+            Self::Product {
+                algebra,
+                factors,
+                max_terms,
+                max_weights,
+            } => {
+                let algebra = read_algebra(&algebra)?;
+                let read = factors.iter().map(|factor| factor.read(algebra, numbering));
+                let factors = read.collect::<Result<Vec<_>, _>>()?;
+                let limits = limits(max_terms, max_weights);
+                Box::new(DecompositionAnswer::product(
+                    algebra, &factors, &limits, numbering,
+                )?)
+            }
+            Self::Power {
+                algebra,
+                irrep,
+                degree,
+                symmetry,
+                max_terms,
+                max_weights,
+            } => {
+                let irrep = irrep.read(read_algebra(&algebra)?, numbering)?;
+                let symmetry = PowerSymmetry::read(&symmetry, degree)?;
+                let limits = limits(max_terms, max_weights);
+                Box::new(DecompositionAnswer::power(
+                    &irrep, &symmetry, &limits, numbering,
+                )?)
             }
             Self::Catalog {
                 algebra,
@@ -99,6 +174,17 @@ impl Request {
 
 fn read_algebra(written: &str) -> Result<SimpleAlgebra, Failure> {
     Ok(written.parse()?)
+}
+
+fn limits(max_terms: Option<usize>, max_weights: Option<u64>) -> Limits {
+    let mut limits = Limits::default();
+    if let Some(terms) = max_terms {
+        limits = limits.with_terms(terms);
+    }
+    if let Some(weights) = max_weights {
+        limits = limits.with_weights(weights);
+    }
+    limits
 }
 
 fn bound(

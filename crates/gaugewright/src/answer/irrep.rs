@@ -1,10 +1,12 @@
 //! Facts of one irrep.
 
-use roots::{Congruency, Irrep, NameBook, Numbering};
+use num_bigint::BigUint;
+use roots::{Congruency, Irrep, Limits, NameBook, Numbering, Weight};
 use serde::{Serialize, Serializer};
 
 use super::Answer;
-use crate::report::{Exact, Page, Phrase, Whole, to_json_line};
+use crate::Failure;
+use crate::report::{Align, Exact, Page, Phrase, Table, Whole, to_json_line};
 
 /// What `gaugewright irrep` answers. Labels are in `numbering`'s order.
 #[derive(Clone, Debug, Serialize)]
@@ -23,13 +25,73 @@ pub struct IrrepAnswer {
     dynkin_index: Whole,
     trace_index: Exact,
     cubic_index: Whole,
+    #[serde(skip_serializing_if = "Option::is_none")]
+    weights: Option<Vec<WeightEntry>>,
     #[serde(skip)]
     of: Irrep,
     #[serde(skip)]
     order: Numbering,
 }
 
+#[derive(Clone, Debug, Serialize)]
+struct WeightEntry {
+    weight: Vec<i64>,
+    multiplicity: Whole,
+}
+
+/// Which weights are listed with an irrep.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, serde::Deserialize)]
+#[serde(rename_all = "lowercase")]
+pub enum WeightsAsked {
+    /// The dominant ones.
+    Dominant,
+    /// All of them.
+    All,
+}
+
+/// Weights that are listed unless told otherwise.
+const MOST_WEIGHTS: usize = 1_000_000;
+
 impl IrrepAnswer {
+    /// The facts of `irrep` with its weights, nodes in `order`.
+    ///
+    /// # Errors
+    /// Where there are more weights than `most`, or else than a million.
+    pub fn with_weights(
+        irrep: Irrep,
+        asked: WeightsAsked,
+        most: Option<usize>,
+        order: Numbering,
+    ) -> Result<Self, Failure> {
+        let most = most.unwrap_or(MOST_WEIGHTS);
+        let limits = Limits::default().with_dominant_weights(most);
+        let entry = |weight: &Weight, multiplicity: &BigUint| WeightEntry {
+            weight: order.from_slansky(irrep.algebra().cartan_type(), weight.labels()),
+            multiplicity: multiplicity.clone().into(),
+        };
+        let mut weights = Vec::new();
+        for (dominant, multiplicity) in irrep.dominant_weights_within(&limits)? {
+            let orbit: Vec<WeightEntry> = match asked {
+                WeightsAsked::Dominant => vec![entry(&dominant, &multiplicity)],
+                WeightsAsked::All if dominant.orbit_size() > BigUint::from(most) => {
+                    return Err(too_many(&irrep, most));
+                }
+                WeightsAsked::All => dominant
+                    .orbit()
+                    .map(|weight| entry(&weight, &multiplicity))
+                    .collect(),
+            };
+            weights.extend(orbit);
+            if weights.len() > most {
+                return Err(too_many(&irrep, most));
+            }
+        }
+        Ok(Self {
+            weights: Some(weights),
+            ..Self::new(irrep, order)
+        })
+    }
+
     /// The facts of `irrep`, nodes in `order`.
     #[must_use]
     pub fn new(irrep: Irrep, order: Numbering) -> Self {
@@ -49,10 +111,20 @@ impl IrrepAnswer {
             dynkin_index: irrep.dynkin_index().into(),
             trace_index: irrep.trace_index().into(),
             cubic_index: irrep.cubic_index().into(),
+            weights: None,
             of: irrep,
             order,
         }
     }
+}
+
+fn too_many(irrep: &Irrep, most: usize) -> Failure {
+    Failure::BeyondLimit(roots::Error::BeyondLimit {
+        what: format!("the list of weights of {}", irrep.bracketed()),
+        size: format!("more than {most} entries"),
+        limit: most as u64,
+        instead: "ask for the dominant ones, or raise the limit on weights".to_owned(),
+    })
 }
 
 impl Answer for IrrepAnswer {
@@ -63,12 +135,12 @@ impl Answer for IrrepAnswer {
     fn page(&self) -> Page {
         let mut names = NameBook::new(self.of.algebra());
         let mut named = |irrep: &Irrep| {
+            let name = name_phrase(&mut names, irrep, self.order);
             let labels = Phrase::labels(irrep.bracketed_in(self.order));
-            match names.name(irrep) {
-                name @ roots::IrrepName::Dimension { .. } => {
-                    Phrase::from(name).then(" ").then(labels)
-                }
-                roots::IrrepName::Labels(_) => labels,
+            if name == labels {
+                labels
+            } else {
+                name.then(" ").then(labels)
             }
         };
         let title = named(&self.of)
@@ -85,6 +157,19 @@ impl Answer for IrrepAnswer {
             ("trace index", self.of.trace_index().into()),
             ("cubic index", self.of.cubic_index().into()),
         ]);
+        if let Some(weights) = &self.weights {
+            page.section(format!("Weights, {} listed", weights.len()));
+            let mut table = Table::new([
+                (Phrase::from("multiplicity"), Align::Right),
+                ("weight".into(), Align::Left),
+            ]);
+            for entry in weights {
+                let labels: Vec<String> = entry.weight.iter().map(i64::to_string).collect();
+                let weight = Phrase::labels(format!("({})", labels.join(",")));
+                table.push([entry.multiplicity.value().clone().into(), weight]);
+            }
+            page.table(table);
+        }
         page
     }
 }
@@ -99,6 +184,14 @@ pub(super) fn written_name(names: &mut NameBook, irrep: &Irrep, order: Numbering
     match names.name(irrep) {
         roots::IrrepName::Labels(_) => irrep.bracketed_in(order),
         name @ roots::IrrepName::Dimension { .. } => name.to_string(),
+    }
+}
+
+/// The name in print; where that is the labels, they are in `order`.
+pub(super) fn name_phrase(names: &mut NameBook, irrep: &Irrep, order: Numbering) -> Phrase {
+    match names.name(irrep) {
+        roots::IrrepName::Labels(_) => Phrase::labels(irrep.bracketed_in(order)),
+        name @ roots::IrrepName::Dimension { .. } => name.into(),
     }
 }
 

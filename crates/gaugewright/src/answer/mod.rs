@@ -6,6 +6,7 @@ mod anomalies;
 mod audit;
 mod audit_page;
 mod catalog;
+mod decomposition;
 mod irrep;
 mod multiplets;
 
@@ -13,7 +14,8 @@ pub use algebra::AlgebraAnswer;
 pub use anomalies::AnomaliesAnswer;
 pub use audit::AuditAnswer;
 pub use catalog::{CATALOG_LIMIT, CatalogAnswer, CatalogEntry};
-pub use irrep::IrrepAnswer;
+pub use decomposition::{DecompositionAnswer, PowerSymmetry};
+pub use irrep::{IrrepAnswer, WeightsAsked};
 
 use crate::report::Page;
 

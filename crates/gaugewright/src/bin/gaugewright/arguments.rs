@@ -2,8 +2,9 @@
 
 use std::path::PathBuf;
 
-use clap::{Parser, Subcommand, ValueEnum};
+use clap::{Args, Parser, Subcommand, ValueEnum};
 use gaugewright::Failure;
+use gaugewright::answer::WeightsAsked;
 use gaugewright::request::{IrrepText, Request};
 use roots::Numbering;
 
@@ -49,6 +50,37 @@ pub(crate) enum Command {
         algebra: String,
         /// A name such as 16bar, or Dynkin labels such as "(0,0,0,1,0)".
         irrep: String,
+        /// List its weights with their multiplicities.
+        #[arg(long, value_enum, value_name = "WHICH")]
+        weights: Option<Weights>,
+        /// How many weights may be listed; a million unless given.
+        #[arg(long, value_name = "N", requires = "weights")]
+        max_weights: Option<usize>,
+    },
+    /// The tensor product of any number of irreps.
+    Product {
+        /// The algebra's name, e.g. "SU(5)".
+        algebra: String,
+        /// Names or Dynkin labels, e.g. 10 10 5bar.
+        #[arg(required = true)]
+        irreps: Vec<String>,
+        #[command(flatten)]
+        limits: LimitArguments,
+    },
+    /// The part of a tensor power with one symmetry.
+    Power {
+        /// The algebra's name, e.g. "SO(10)".
+        algebra: String,
+        /// A name such as 16, or Dynkin labels.
+        irrep: String,
+        /// The degree; a partition tells it by itself.
+        #[arg(long, value_name = "N")]
+        degree: Option<u32>,
+        /// symmetric, antisymmetric, or a partition such as 2,1.
+        #[arg(long, value_name = "SYMMETRY", default_value = "symmetric")]
+        symmetry: String,
+        #[command(flatten)]
+        limits: LimitArguments,
     },
     /// Irreps of an algebra up to a bound.
     Catalog {
@@ -81,14 +113,68 @@ pub(crate) enum Command {
     },
 }
 
+/// Limits of one's own.
+#[derive(Clone, Copy, Debug, Args)]
+pub(crate) struct LimitArguments {
+    /// How many different irreps the answer may have; two million unless given.
+    #[arg(long, value_name = "N")]
+    max_terms: Option<usize>,
+    /// How many weights may be walked through; 20 thousand million unless given.
+    #[arg(long, value_name = "N")]
+    max_weights: Option<u64>,
+}
+
+/// Which weights are listed.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, ValueEnum)]
+pub(crate) enum Weights {
+    /// One for each Weyl orbit.
+    Dominant,
+    /// All of them.
+    All,
+}
+
 impl Command {
     /// What is meant by what was typed; `Batch` holds many requests and is run by itself.
     pub(crate) fn request(self) -> Result<Request, Failure> {
         Ok(match self {
             Self::Algebra { algebra } => Request::Algebra { algebra },
-            Self::Irrep { algebra, irrep } => Request::Irrep {
+            Self::Irrep {
+                algebra,
+                irrep,
+                weights,
+                max_weights,
+            } => Request::Irrep {
                 algebra,
                 irrep: IrrepText::Written(irrep),
+                weights: weights.map(|which| match which {
+                    Weights::Dominant => WeightsAsked::Dominant,
+                    Weights::All => WeightsAsked::All,
+                }),
+                max_weights,
+            },
+            Self::Product {
+                algebra,
+                irreps,
+                limits,
+            } => Request::Product {
+                algebra,
+                factors: irreps.into_iter().map(IrrepText::Written).collect(),
+                max_terms: limits.max_terms,
+                max_weights: limits.max_weights,
+            },
+            Self::Power {
+                algebra,
+                irrep,
+                degree,
+                symmetry,
+                limits,
+            } => Request::Power {
+                algebra,
+                irrep: IrrepText::Written(irrep),
+                degree,
+                symmetry,
+                max_terms: limits.max_terms,
+                max_weights: limits.max_weights,
             },
             Self::Catalog {
                 algebra,
