@@ -85,6 +85,20 @@ fn complaint(algebra_name: &str, written: &str) -> String {
         .to_string()
 }
 
+#[test]
+fn products_as_they_may_be_written() {
+    for written in [
+        "SU(3) x SU(2) x U(1)",
+        "su3xsu2xu1",
+        " SU (3)\u{d7}SU( 2 ) X U (1) ",
+        "A2 x A1 x u1",
+        "SU(3) x SO(3) x U( 1 )",
+    ] {
+        let product: ReductiveAlgebra = written.parse().unwrap();
+        assert_eq!(product.to_string(), "SU(3) x SU(2) x U(1)", "{written}");
+    }
+}
+
 /// Ambiguous and unknown names list what may be meant, with labels.
 #[test]
 fn candidates() {

@@ -3,8 +3,6 @@
 //! The dimension grows with every label, so both searches stop where it passes the bound.
 
 use num_bigint::BigUint;
-use num_rational::BigRational;
-use num_traits::Zero;
 
 use crate::dimension::dimension_at_most;
 use crate::{Error, Irrep, SimpleAlgebra, index};
@@ -145,18 +143,11 @@ impl CatalogBound {
         match self {
             Self::Dimension(most) => within(most),
             Self::DynkinIndex(most) => {
-                let casimir = index::casimir(cartan_type, irrep.labels());
-                casimir.is_zero() || within(&largest_dimension(irrep.algebra(), &casimir, most))
+                index::largest_dimension(irrep.algebra(), irrep.labels(), most)
+                    .is_none_or(|dimension| within(&dimension))
             }
         }
     }
-}
-
-/// The largest dimension that goes with that Casimir and a Dynkin index of at most `index`:
-/// l = 2 C2 dim(R) / dim(G).
-fn largest_dimension(algebra: SimpleAlgebra, casimir: &BigRational, index: &BigUint) -> BigUint {
-    let above = BigUint::from(algebra.dimension()) * index * casimir.denom().magnitude();
-    above / (casimir.numer().magnitude() * 2u32)
 }
 
 impl SimpleAlgebra {

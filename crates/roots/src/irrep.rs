@@ -116,7 +116,7 @@ impl Irrep {
     /// [Dynkin 1957]; [Slansky 1981].
     #[must_use]
     pub fn dynkin_index(&self) -> BigUint {
-        index::dynkin_index(self.algebra, &self.casimir(), &self.dimension())
+        index::dynkin_index(self.algebra, &self.labels, &self.dimension())
     }
 
     /// The trace T = l / 2 of a generator squared, 1/2 for the SU(N) fundamental.
@@ -132,7 +132,7 @@ impl Irrep {
     /// [Banks-Georgi 1976]; [Okubo 1977].
     #[must_use]
     pub fn cubic_index(&self) -> BigInt {
-        index::cubic_index(self.algebra.cartan_type(), &self.labels, &self.dimension())
+        index::cubic_index(self.algebra.cartan_type(), &self.labels)
     }
 
     /// Its name: the dimension with a bar, primes or the letters of SO(8) where they apply; the

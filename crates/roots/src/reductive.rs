@@ -51,11 +51,12 @@ impl FromStr for Factor {
     type Err = Error;
 
     fn from_str(written: &str) -> Result<Self, Error> {
-        let trimmed = written.trim();
-        if trimmed.eq_ignore_ascii_case("U(1)") || trimmed.eq_ignore_ascii_case("U1") {
+        let letters = written.chars().filter(|c| !c.is_whitespace());
+        let letters: String = letters.take("U(1)".len() + 1).collect();
+        if letters.eq_ignore_ascii_case("U(1)") || letters.eq_ignore_ascii_case("U1") {
             return Ok(Self::U1);
         }
-        match trimmed.parse() {
+        match written.parse() {
             Ok(algebra) => Ok(Self::Simple(algebra)),
             Err(Error::UnknownAlgebra { written, .. }) => Err(Error::UnknownAlgebra {
                 written,
