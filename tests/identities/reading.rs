@@ -162,7 +162,7 @@ fn errors_of_labels_and_algebras() {
         ("1,0,0,0", "(1000)"),
         ("", "(1000)"),
         ("five", "(1000)"),
-        ("2000000000", "1000000000"),
+        ("2000000000", "beyond dimension 1000000,"),
     ];
     for (written, part) in cases {
         let complaint = complaint("SU(5)", written);

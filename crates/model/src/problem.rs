@@ -327,7 +327,7 @@ fn repeated(error: &roots::Error) -> Option<&str> {
         | E::BadIrrep { written, .. }
         | E::UnknownIrrep { written, .. }
         | E::AmbiguousIrrep { written, .. }
-        | E::BeyondNames { written }
+        | E::BeyondNames { written, .. }
         | E::BadNumber { written } => Some(written),
         _ => None,
     }

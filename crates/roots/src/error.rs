@@ -118,11 +118,14 @@ pub enum Error {
     },
     /// A name beyond the bound up to which names are worked out.
     #[error(
-        "\"{written}\" is beyond dimension {}, up to which irreps have names; \
-         write its Dynkin labels",
-        crate::irrep_name::NAMED_UP_TO
+        "\"{written}\" is beyond dimension {most}, up to which irreps of {algebra} have names; \
+         write its Dynkin labels"
     )]
     BeyondNames {
+        /// Name of the algebra.
+        algebra: String,
+        /// The bound.
+        most: u32,
         /// What was written.
         written: String,
     },

@@ -136,7 +136,7 @@ impl Irrep {
     }
 
     /// Its name: the dimension with a bar, primes or the letters of SO(8) where they apply; the
-    /// labels in brackets where the dimension is beyond [`NAMED_UP_TO`](crate::NAMED_UP_TO).
+    /// labels in brackets where the dimension is beyond [`SimpleAlgebra::named_up_to`].
     ///
     /// # Cost
     /// Looks for all irreps of that dimension.

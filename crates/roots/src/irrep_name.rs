@@ -22,8 +22,17 @@ use crate::congruency::{Congruency, congruency};
 use crate::dimension_search::irreps_of_dimension;
 use crate::{CartanType, CatalogBound, Error, Family, Irrep, SimpleAlgebra};
 
-/// The dimension up to which irreps have names; beyond it they go by their labels.
-pub const NAMED_UP_TO: u32 = 1_000_000_000;
+impl SimpleAlgebra {
+    /// The dimension up to which irreps have names: 10^9 for the exceptional algebras, 10^6 for
+    /// the others, which have far more irreps that small. Beyond it irreps go by their labels.
+    #[must_use]
+    pub const fn named_up_to(self) -> u32 {
+        match self.cartan_type().family() {
+            Family::E | Family::F | Family::G => 1_000_000_000,
+            Family::A | Family::B | Family::C | Family::D => 1_000_000,
+        }
+    }
+}
 
 /// The name of an irrep, in its parts.
 #[derive(Clone, Debug, PartialEq, Eq, Hash)]
@@ -39,7 +48,7 @@ pub enum IrrepName {
         /// Whether it is the conjugate one of a pair.
         bar: bool,
     },
-    /// Labels in brackets, beyond [`NAMED_UP_TO`].
+    /// Labels in brackets, beyond [`SimpleAlgebra::named_up_to`].
     Labels(String),
 }
 
@@ -110,6 +119,20 @@ impl NameBook {
         Ok(all)
     }
 
+    /// Makes ready to name all of these at once: many irreps are looked up faster in a list of all
+    /// up to the largest dimension than one dimension at a time.
+    pub fn prepare(&mut self, irreps: &[Irrep]) {
+        const MANY: usize = 32;
+        const LONGEST_LIST: usize = 50_000;
+        let most = BigUint::from(self.algebra.named_up_to());
+        let dimensions = irreps.iter().map(Irrep::dimension).filter(|d| *d <= most);
+        let dimensions: Vec<BigUint> = dimensions.collect();
+        if let Some(largest) = dimensions.iter().max().filter(|_| dimensions.len() > MANY) {
+            // A list that is too long is left to single searches, which are fast in rank 1.
+            let _ = self.up_to_dimension(largest, LONGEST_LIST);
+        }
+    }
+
     /// The name of `irrep`.
     ///
     /// # Panics
@@ -117,7 +140,8 @@ impl NameBook {
     #[must_use]
     pub fn name(&mut self, irrep: &Irrep) -> IrrepName {
         let dimension = irrep.dimension();
-        let Some(small) = u32::try_from(&dimension).ok().filter(|&d| d <= NAMED_UP_TO) else {
+        let most = self.algebra.named_up_to();
+        let Some(small) = u32::try_from(&dimension).ok().filter(|&d| d <= most) else {
             return IrrepName::Labels(irrep.bracketed());
         };
         let equals = self.of_dimension(&dimension);
@@ -146,8 +170,8 @@ impl NameBook {
     /// Every irrep of that dimension, by Dynkin index, then in the order of their names.
     ///
     /// # Cost
-    /// Some milliseconds at [`NAMED_UP_TO`]. It grows with the dimension without bound, so that far
-    /// beyond it this may take very long.
+    /// Less than some milliseconds up to [`SimpleAlgebra::named_up_to`]. It grows with the dimension
+    /// without bound, so that far beyond it this may take very long.
     pub fn of_dimension(&mut self, dimension: &BigUint) -> &[Irrep] {
         let algebra = self.algebra;
         self.known.entry(dimension.clone()).or_insert_with(|| {

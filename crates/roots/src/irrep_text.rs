@@ -3,7 +3,6 @@
 use num_bigint::BigUint;
 
 use crate::dimension::{dimension, dimension_at_most};
-use crate::irrep_name::NAMED_UP_TO;
 use crate::text::shortened;
 use crate::{CatalogBound, Error, Irrep, IrrepName, NameBook, Numbering, SimpleAlgebra};
 
@@ -56,8 +55,10 @@ impl SimpleAlgebra {
     }
 
     fn find(self, numbering: Numbering, written: &str, name: &WrittenName) -> Result<Irrep, Error> {
-        if name.dimension > BigUint::from(NAMED_UP_TO) {
+        if name.dimension > BigUint::from(self.named_up_to()) {
             return Err(Error::BeyondNames {
+                algebra: self.to_string(),
+                most: self.named_up_to(),
                 written: shortened(written),
             });
         }

@@ -79,7 +79,7 @@ pub use dynkin_diagram::DynkinDiagram;
 pub use error::Error;
 pub use integer_lattice::{FiniteAbelian, rows_without};
 pub use irrep::Irrep;
-pub use irrep_name::{IrrepName, NAMED_UP_TO, NameBook};
+pub use irrep_name::{IrrepName, NameBook};
 pub use limits::Limits;
 pub use numbering::Numbering;
 pub use partition::Partition;

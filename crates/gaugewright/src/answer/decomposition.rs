@@ -87,7 +87,7 @@ impl DecompositionAnswer {
         let shown = factors
             .iter()
             .map(|factor| name_phrase(&mut names, factor, order));
-        let title = Phrase::join(shown, " x ")
+        let title = Phrase::product(shown)
             .then(" of ")
             .then(Phrase::algebra(algebra));
         Ok(Self::new(&product, factors, title, &mut names, order))
@@ -127,6 +127,7 @@ impl DecompositionAnswer {
     ) -> Self {
         let mut irreps: Vec<Irrep> = sum.irreps().cloned().collect();
         NameBook::sort(&mut irreps);
+        names.prepare(&irreps);
         let terms = irreps
             .iter()
             .map(|irrep| term(names, irrep, sum.multiplicity(irrep), order));

@@ -74,10 +74,20 @@ impl Phrase {
     /// Phrases with a separator between them.
     #[must_use]
     pub fn join(phrases: impl IntoIterator<Item = Self>, separator: &str) -> Self {
+        Self::between(phrases, &separator.into())
+    }
+
+    /// Phrases with times signs between them.
+    #[must_use]
+    pub fn product(phrases: impl IntoIterator<Item = Self>) -> Self {
+        Self::between(phrases, &Self::symbol(" x ", " \\times "))
+    }
+
+    fn between(phrases: impl IntoIterator<Item = Self>, separator: &Self) -> Self {
         let mut joined = Self::new();
         for (place, phrase) in phrases.into_iter().enumerate() {
             if place > 0 {
-                joined = joined.then(separator);
+                joined = joined.then(separator.clone());
             }
             joined = joined.then(phrase);
         }

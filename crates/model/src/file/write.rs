@@ -83,7 +83,9 @@ fn multiplet(text: &mut String, multiplet: &Multiplet, symmetries: &[Symmetry]) 
 
 fn transformation(one: &Transformation) -> String {
     match one {
-        Transformation::Irrep(irrep) if irrep.dimension() <= BigUint::from(roots::NAMED_UP_TO) => {
+        Transformation::Irrep(irrep)
+            if irrep.dimension() <= BigUint::from(irrep.algebra().named_up_to()) =>
+        {
             quoted(&irrep.name())
         }
         Transformation::Irrep(irrep) => quoted(&irrep.bracketed()),
