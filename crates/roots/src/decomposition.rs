@@ -155,10 +155,7 @@ impl Decomposition {
 
 /// The irrep with that highest weight.
 pub(crate) fn irrep_of<L: Lanes>(algebra: SimpleAlgebra, highest: &L) -> Irrep {
-    Irrep::from_fn(algebra, |node| {
-        // Products and powers are refused where a label of theirs could leave u32.
-        u32::try_from(highest.label(node)).expect("labels of a dominant weight fit")
-    })
+    Irrep::from_labels(algebra, highest.dominant_labels(algebra.rank()))
 }
 
 /// The highest weight of an irrep.

@@ -228,7 +228,9 @@ fn product_of_two<L: Lanes>(
     right: &Irrep,
     limits: &Limits,
 ) -> Result<Decomposition, Error> {
-    let (large, small) = if left.dimension() < right.dimension() {
+    // The height of the highest weight over the lowest: a cheap measure of the number of weights.
+    let level = |irrep: &Irrep| frame.level(&highest_weight::<L>(irrep));
+    let (large, small) = if level(left) < level(right) {
         (right, left)
     } else {
         (left, right)
