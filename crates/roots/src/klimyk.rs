@@ -97,8 +97,9 @@ fn fits<L, C: Count>(sum: &[(L, C)], factor: &Factor<L, C>) -> bool {
 /// The entries with rho taken off again.
 pub(crate) fn unshifted<L: Lanes, C: Count>(
     frame: &Frame<L>,
-    terms: LaneTable<L, C>,
-) -> impl Iterator<Item = (L, C)> {
-    let entries = terms.into_entries().filter(|(_, count)| !count.is_zero());
-    entries.map(|(shifted, count)| (shifted.minus(&frame.rho), count))
+    terms: &LaneTable<L, C>,
+) -> Counted<L, C> {
+    terms.collect(|shifted, count| {
+        (!count.is_zero()).then(|| (shifted.minus(&frame.rho), count.clone()))
+    })
 }

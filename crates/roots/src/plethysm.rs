@@ -108,6 +108,7 @@ fn power_in<L: Lanes, C: Count>(
         debug_assert!(rest.is_zero(), "multiplicities are whole");
         (weight, times)
     });
+    let terms = terms.collect();
     Ok(Decomposition::from_counts(irrep.algebra(), terms))
 }
 
@@ -138,7 +139,7 @@ impl<L: Lanes, C: Count> Expansion<'_, L, C> {
                 let scale = length.into();
                 let times = klimyk::times(self.frame, &sum, &self.factor, scale, self.limits)?;
                 let Some(times) = times else { return Ok(None) };
-                sum = klimyk::unshifted(self.frame, times).collect();
+                sum = klimyk::unshifted(self.frame, &times);
             }
             let rest = left - cycles * length;
             if rest != 0 && rest <= length {

@@ -137,7 +137,7 @@ fn product_in<L: Lanes>(
         [left, right] => product_of_two(algebra, frame, left, right, limits),
         _ => Ok(in_width!(Counts => {
             let sum = many::<L, Counts>(frame, factors, limits)?;
-            sum.and_then(|sum| Decomposition::from_counts(algebra, sum.into_iter()))
+            sum.and_then(|sum| Decomposition::from_counts(algebra, sum))
         })),
     }
 }
@@ -167,7 +167,7 @@ fn many<L: Lanes, C: Count>(
             return Ok(None);
         };
         match klimyk::times(frame, &sum, factor, 1, limits)? {
-            Some(terms) => sum = klimyk::unshifted(frame, terms).collect(),
+            Some(terms) => sum = klimyk::unshifted(frame, &terms),
             None => return Ok(None),
         }
     }
@@ -236,8 +236,7 @@ fn product_of_two<L: Lanes>(
         (left, right)
     };
     if let Some(terms) = by_young_diagrams(large, small) {
-        let terms = terms.into_entries();
-        let terms = terms.map(|(weight, n): (L, u64)| (weight, i128::from(n)));
+        let terms = terms.collect(|weight: &L, &n| Some((weight.clone(), i128::from(n))));
         let product = Decomposition::from_counts(algebra, terms);
         return Ok(product.expect("tableaux are counted, and so not negative"));
     }
@@ -248,8 +247,7 @@ fn product_of_two<L: Lanes>(
                 let sum = [(highest_weight::<L>(large), Counts::of(1))];
                 let terms = klimyk::times(frame, &sum, &factor, 1, limits)?;
                 terms.and_then(|terms| {
-                    let terms = klimyk::unshifted(frame, terms);
-                    Decomposition::from_counts(algebra, terms)
+                    Decomposition::from_counts(algebra, klimyk::unshifted(frame, &terms))
                 })
             }
         }

@@ -46,7 +46,7 @@ fn by_klimyk<L: Lanes>(frame: &Frame<L>, large: &Irrep, small: &Irrep) -> Decomp
         let sum = [(highest_weight::<L>(large), Counts::from(1u8))];
         let terms = klimyk::times(frame, &sum, &factor.unwrap(), 1, &limits).unwrap();
         terms.and_then(|terms| {
-            Decomposition::from_counts(large.algebra(), klimyk::unshifted(frame, terms))
+            Decomposition::from_counts(large.algebra(), klimyk::unshifted(frame, &terms))
         })
     })
 }
@@ -108,7 +108,7 @@ fn from_same_lanes<L: Lanes>(
     algebra: SimpleAlgebra,
     entries: impl Iterator<Item = (L, i128)>,
 ) -> Decomposition {
-    Decomposition::from_counts(algebra, entries).unwrap()
+    Decomposition::from_counts(algebra, entries.collect()).unwrap()
 }
 
 /// Beyond rank 8 and with labels that fit no lane: SU(N) by tableaux, SO(N) by dimension.
