@@ -4,6 +4,9 @@
 //! `cargo bench -p benches --bench product_growth`. Memory is the peak resident set that Linux
 //! reports for the whole process (`VmHWM`), read before and after the first thing done here.
 
+// Times are measured, and printed as decimals.
+#![allow(clippy::float_arithmetic, clippy::cast_precision_loss)]
+
 use std::hint::black_box;
 use std::time::Instant;
 
@@ -33,7 +36,6 @@ fn memory() {
     }
 }
 
-#[allow(clippy::float_arithmetic, clippy::cast_precision_loss)]
 fn growth() {
     println!(
         "\n{:<44} {:>9} {:>12} {:>12}",

@@ -24,11 +24,17 @@ impl<L: Lanes> DominantWeights<L> {
     pub(crate) fn below(frame: &Frame<L>, highest: L, limit: usize) -> Result<Self, Error> {
         let mut found = LaneTable::<L, u32>::for_entries(32);
         found.at(&highest);
+        if frame.is_minuscule(&highest) {
+            return Ok(Self {
+                weights: vec![highest],
+                places: found,
+            });
+        }
         let mut weights = vec![(frame.level(&highest), highest)];
         let mut next = 0;
         while let Some((_, weight)) = weights.get(next).cloned() {
             next += 1;
-            for root in &frame.positive_roots {
+            for root in frame.positive_roots() {
                 let lower = weight.minus(&root.labels);
                 if !lower.is_dominant() {
                     continue;

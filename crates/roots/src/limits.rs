@@ -24,12 +24,12 @@ pub struct Limits {
 }
 
 impl Default for Limits {
-    /// Two million terms (about 200 MB), as many dominant weights, and 20 thousand million
+    /// Two million terms (about 200 MB), 200 thousand dominant weights, and 20 thousand million
     /// weights (minutes).
     fn default() -> Self {
         Self {
             terms: 2_000_000,
-            dominant_weights: 2_000_000,
+            dominant_weights: 200_000,
             weights: 20_000_000_000,
         }
     }

@@ -13,7 +13,7 @@ pub(crate) fn rows(labels: &[u32]) -> Vec<i64> {
 }
 
 /// The product of the irreps with diagrams `base` and `added`, by highest weights; `None` where
-/// it takes more than `budget` steps.
+/// it takes more than `budget` steps. Stops early with more than `most_terms` terms.
 ///
 /// The boxes of `added` are put on `base`, those of its first row first, no two of one row in one
 /// column, so that read from the right, row by row from the top, each row's boxes never outnumber
@@ -28,6 +28,7 @@ pub(crate) fn product<L: Lanes>(
     base: &[i64],
     added: &[i64],
     budget: u64,
+    most_terms: usize,
 ) -> Option<LaneTable<L, u64>> {
     let last = added.iter().rposition(|&row| row > 0);
     let mut filling = Filling {
@@ -37,6 +38,7 @@ pub(crate) fn product<L: Lanes>(
         last: last.unwrap_or(0),
         above: vec![0; base.len()],
         steps_left: budget,
+        most_terms,
         terms: LaneTable::for_entries(16),
     };
     let whole = if last.is_none() {
@@ -59,6 +61,7 @@ struct Filling<'a, L> {
     /// How many boxes of the row before the current one lie in each row of the diagram.
     above: Vec<i64>,
     steps_left: u64,
+    most_terms: usize,
     terms: LaneTable<L, u64>,
 }
 
@@ -83,6 +86,9 @@ impl<L: Lanes> Filling<'_, L> {
         placed: &mut Vec<i64>,
     ) -> Option<()> {
         self.steps_left = self.steps_left.checked_sub(1)?;
+        if self.terms.len() > self.most_terms {
+            return Some(());
+        }
         if left == 0 {
             return self.finish(value, placed);
         }
@@ -100,7 +106,10 @@ impl<L: Lanes> Filling<'_, L> {
             self.before[row - 1] - self.before[row]
         };
         let most = left.min(room).min(allowance);
-        for boxes in 0..=most {
+        // The rows below have room for no more than the row is longer than the last one.
+        let last = self.before[self.before.len() - 1];
+        let least = (left - (self.before[row] - last)).max(0);
+        for boxes in least..=most {
             self.shape[row] = self.before[row] + boxes;
             placed[row] = boxes;
             self.place(value, row + 1, left - boxes, allowance - boxes, placed)?;

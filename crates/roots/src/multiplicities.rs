@@ -67,6 +67,9 @@ pub(crate) fn recursion<L: Lanes, C: Count>(
         weights,
         counts: vec![C::one()],
     };
+    if known.weights.weights().len() == 1 {
+        return Some(known);
+    }
     let highest = known.weights.weights().first()?;
     let top = frame.scaled_norm(&highest.plus(&frame.rho));
     for place in 1..known.weights.weights().len() {
@@ -89,7 +92,7 @@ fn plain_sum<L: Lanes, C: Count>(
     known: &DominantMultiplicities<L, C>,
     weight: &L,
 ) -> Option<C> {
-    let mut roots = frame.positive_roots.iter();
+    let mut roots = frame.positive_roots().iter();
     roots.try_fold(C::zero(), |sum, root| {
         sum.checked_add(&string_sum(frame, known, weight, root)?)
     })
@@ -106,7 +109,7 @@ fn folded_sum<L: Lanes, C: Count>(
     let zeros = frame.zeros(weight);
     let stabiliser = frame.subgroup_order(zeros);
     let mut sum = C::zero();
-    for root in &frame.positive_roots {
+    for root in frame.positive_roots() {
         if !weight.plus(&root.clipped).is_dominant() {
             continue;
         }

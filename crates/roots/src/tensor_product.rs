@@ -2,8 +2,6 @@
 
 use std::collections::HashMap;
 
-use num_bigint::BigUint;
-
 use crate::count::{Count, in_width};
 use crate::decomposition::{highest_weight, irrep_of};
 use crate::frame::{Frame, label_bound};
@@ -235,11 +233,31 @@ fn product_of_two<L: Lanes>(
     } else {
         (left, right)
     };
-    if let Some(terms) = by_young_diagrams(large, small) {
-        let terms = terms.collect(|weight: &L, &n| Some((weight.clone(), i128::from(n))));
-        let product = Decomposition::from_counts(algebra, terms);
-        return Ok(product.expect("tableaux are counted, and so not negative"));
+    if algebra.cartan_type().family() != Family::A {
+        return by_reflection(algebra, frame, large, small, limits);
     }
+    let budget = tableau_budget(frame, small);
+    if let Some(product) = by_tableaux::<L>(large, small, budget, limits)? {
+        return Ok(product);
+    }
+    // Where there are too many weights, there may still be few tableaux.
+    let reflected = by_reflection(algebra, frame, large, small, limits);
+    match reflected {
+        Err(Error::TooMany { .. } | Error::BeyondLimit { .. }) => {
+            let tableaux = by_tableaux::<L>(large, small, limits.weights(), limits)?;
+            tableaux.map_or(reflected, Ok)
+        }
+        done => done,
+    }
+}
+
+fn by_reflection<L: Lanes>(
+    algebra: SimpleAlgebra,
+    frame: &Frame<L>,
+    large: &Irrep,
+    small: &Irrep,
+    limits: &Limits,
+) -> Result<Decomposition, Error> {
     Ok(in_width!(Counts => {
         match factor::<L, Counts>(frame, small, limits)? {
             None => None,
@@ -254,26 +272,37 @@ fn product_of_two<L: Lanes>(
     }))
 }
 
-/// The product of two irreps of SU(N) by Young tableaux, where these are fewer than the weights of
-/// the smaller irrep are estimated to be; `None` for other algebras.
-fn by_young_diagrams<L: Lanes>(large: &Irrep, small: &Irrep) -> Option<LaneTable<L, u64>> {
-    let algebra = large.algebra();
-    if algebra.cartan_type().family() != Family::A {
-        return None;
-    }
-    let budget = if algebra.rank() == 1 {
-        // Each term has one tableau.
-        u64::MAX
-    } else {
-        tableau_budget(small)
-    };
+/// The product of two irreps of SU(N) by Young tableaux; `None` where it takes more than `budget`
+/// steps.
+fn by_tableaux<L: Lanes>(
+    large: &Irrep,
+    small: &Irrep,
+    budget: u64,
+    limits: &Limits,
+) -> Result<Option<Decomposition>, Error> {
     let rows = littlewood_richardson::rows;
-    littlewood_richardson::product(&rows(large.labels()), &rows(small.labels()), budget)
+    let (base, added) = (rows(large.labels()), rows(small.labels()));
+    let terms: Option<LaneTable<L, u64>> =
+        littlewood_richardson::product(&base, &added, budget, limits.terms());
+    let Some(terms) = terms else { return Ok(None) };
+    if terms.len() > limits.terms() {
+        return Err(limits.too_many_terms(format!("more than {}", limits.terms())));
+    }
+    let terms = terms.collect(|weight, &n| Some((weight.clone(), i128::from(n))));
+    Ok(Decomposition::from_counts(large.algebra(), terms))
 }
 
-/// Steps that tableaux may take: a step costs about half of a reflection, and the weights are at
-/// least as many as there are in the highest orbit.
-fn tableau_budget(small: &Irrep) -> u64 {
-    let orbit = crate::dimension::orbit_size(small.algebra().cartan_type(), small.labels());
-    u64::try_from(orbit / BigUint::from(4u32)).unwrap_or(u64::MAX)
+/// Steps that tableaux may take before reflection is tried. There are at least as many weights as
+/// in the highest orbit, and a step costs about as much as a weight; irreps with few tableaux,
+/// such as symmetric tensors, need about as many steps as they have boxes and rows. What is spent
+/// in vain is a small part of what reflection takes.
+fn tableau_budget<L: Lanes>(frame: &Frame<L>, small: &Irrep) -> u64 {
+    let highest = highest_weight(small);
+    if frame.rank() == 1 {
+        // Each term has one tableau.
+        return u64::MAX;
+    }
+    let orbit = orbit_size(small.algebra(), frame, &highest).unwrap_or(u64::MAX);
+    let boxes = frame.level(&highest).unsigned_abs();
+    (orbit / 8).max(boxes.saturating_mul(frame.rank() as u64 / 4))
 }

@@ -92,7 +92,7 @@ proptest! {
             for (base, added) in [(&left, &right), (&right, &left)] {
                 let rows = littlewood_richardson::rows;
                 let product =
-                    littlewood_richardson::product(&rows(base.labels()), &rows(added.labels()), u64::MAX);
+                    littlewood_richardson::product(&rows(base.labels()), &rows(added.labels()), u64::MAX, usize::MAX);
                 let entries = product.unwrap().into_entries().map(|(w, n)| (w, i128::from(n)));
                 let fits = |_: &crate::frame::Held<_>| ();
                 fits(&held);
@@ -171,6 +171,35 @@ fn orders_two_ways() {
             if let Some(held) = &held {
                 assert_eq!(size, held.orbit_size(&highest_weight(&irrep)).into());
             }
+        }
+    }
+}
+
+/// The sum of positive coroots, and which irreps have one orbit of weights: that of the root
+/// system, for every type up to rank 9.
+#[test]
+fn heights_and_minuscule_weights() {
+    for algebra in SimpleAlgebra::up_to_rank(9) {
+        let wide = Wide::frame(algebra.cartan_type());
+        for node in 0..algebra.rank() {
+            let fundamental = Irrep::from_fn(algebra, |i| u32::from(i == node));
+            let weight = highest_weight::<Wide>(&fundamental);
+            let roots = algebra.root_system();
+            let coroots = roots
+                .positive_roots()
+                .map(|root| i64::from(root.coroot()[node]));
+            assert_eq!(
+                wide.level(&weight),
+                coroots.sum::<i64>(),
+                "{algebra} node {node}"
+            );
+            let one_orbit =
+                wide.orbit_size(&weight) == u64::try_from(fundamental.dimension()).unwrap();
+            assert_eq!(
+                wide.is_minuscule(&weight),
+                one_orbit,
+                "{algebra} node {node}"
+            );
         }
     }
 }
