@@ -151,6 +151,10 @@ impl<L: Lanes> Frame<L> {
         Held::Static(held[place].get_or_init(|| Self::new(of)))
     }
 
+    pub(crate) const fn cartan_type(&self) -> CartanType {
+        self.cartan_type
+    }
+
     pub(crate) const fn rank(&self) -> usize {
         self.rank
     }
@@ -161,8 +165,9 @@ impl<L: Lanes> Frame<L> {
 
     /// `2 (mu, rho-check)`: twice the height, up to a constant, of a weight below another.
     pub(crate) fn level(&self, weight: &L) -> i64 {
-        let coefficients = self.twice_rho_check.iter().enumerate();
-        coefficients.map(|(i, &c)| c * weight.label(i)).sum()
+        let labels = weight.labels(self.rank);
+        let terms = self.twice_rho_check.iter().zip(&labels);
+        terms.map(|(c, label)| c * label).sum()
     }
 
     /// By how much [`scaled_norm`](Self::scaled_norm) is larger than the norm with the shortest
@@ -175,15 +180,25 @@ impl<L: Lanes> Frame<L> {
     ///
     /// Labels below 2^33 and at most 256 nodes keep it below 2^100.
     pub(crate) fn scaled_norm(&self, weight: &L) -> i128 {
-        let rows = self.depth().metric.chunks(self.rank).enumerate();
-        let terms = rows.map(|(i, row)| {
-            let row = row.iter().enumerate();
-            let paired: i128 = row
-                .map(|(j, &g)| i128::from(g) * i128::from(weight.label(j)))
+        let labels = weight.labels(self.rank);
+        let rows = self.depth().metric.chunks(self.rank).zip(&labels);
+        if L::NARROW {
+            let norm: i64 = rows
+                .map(|(row, label)| {
+                    let paired: i64 = row.iter().zip(&labels).map(|(g, label)| g * label).sum();
+                    paired * label
+                })
                 .sum();
-            paired * i128::from(weight.label(i))
-        });
-        terms.sum()
+            return norm.into();
+        }
+        rows.map(|(row, &label)| {
+            let terms = row.iter().zip(&labels);
+            let paired: i128 = terms
+                .map(|(&g, &label)| i128::from(g) * i128::from(label))
+                .sum();
+            paired * i128::from(label)
+        })
+        .sum()
     }
 
     /// Whether a dominant weight is the only one of its irrep, which has then one orbit of weights:

@@ -17,6 +17,10 @@ use crate::frame::{Frame, Held};
 /// A weight by its Dynkin labels. The lanes beyond the rank hold what [`pack`](Self::pack) and
 /// [`all_ones`](Self::all_ones) put there; no root reaches them.
 pub(crate) trait Lanes: Clone + Eq + Debug + Send + Sync + 'static {
+    /// Whether all labels are below 2^15 in size and all ranks at most 16, so that squared lengths
+    /// are far below 2^63.
+    const NARROW: bool;
+
     /// Whether weights of that rank, all labels at most `bound` in size, can be held.
     fn holds(rank: usize, bound: u64) -> bool;
 
@@ -111,6 +115,8 @@ macro_rules! packed {
         }
 
         impl Lanes for $name {
+            const NARROW: bool = true;
+
             fn holds(rank: usize, bound: u64) -> bool {
                 rank <= $lanes && bound < 1 << ($bits - 1)
             }
@@ -271,6 +277,8 @@ impl Wide {
 }
 
 impl Lanes for Wide {
+    const NARROW: bool = false;
+
     fn holds(_rank: usize, bound: u64) -> bool {
         bound < 1 << 60
     }

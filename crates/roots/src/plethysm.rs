@@ -15,7 +15,7 @@ impl Irrep {
     /// antisymmetric for a single column.
     ///
     /// # Errors
-    /// [`Error::BeyondLimit`] or [`Error::TooMany`] where it is too large for the [`Limits`].
+    /// [`Error::BeyondLimit`] where it is too large for the [`Limits`].
     /// # Cost
     /// For each class of permutations about one product with the irrep, the classes taken
     /// together as Horner's rule takes the terms of a polynomial.

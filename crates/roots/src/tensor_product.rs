@@ -15,7 +15,7 @@ impl SimpleAlgebra {
     /// The tensor product of any number of irreps; of none, the singlet.
     ///
     /// # Errors
-    /// [`Error::MixedAlgebras`]; [`Error::BeyondLimit`] or [`Error::TooMany`] where it is too
+    /// [`Error::MixedAlgebras`]; [`Error::BeyondLimit`] where it is too
     /// large for the [`Limits`].
     /// # Cost
     /// For two factors, one reflection per different weight of the smaller one, or for SU(N) one
@@ -243,7 +243,7 @@ fn product_of_two<L: Lanes>(
     // Where there are too many weights, there may still be few tableaux.
     let reflected = by_reflection(algebra, frame, large, small, limits);
     match reflected {
-        Err(Error::TooMany { .. } | Error::BeyondLimit { .. }) => {
+        Err(Error::BeyondLimit { .. }) => {
             let tableaux = by_tableaux::<L>(large, small, limits.weights(), limits)?;
             tableaux.map_or(reflected, Ok)
         }
