@@ -6,8 +6,8 @@ use crate::count::{Count, in_width};
 use crate::decomposition::{highest_weight, irrep_of};
 use crate::frame::{Frame, label_bound};
 use crate::klimyk::{self, Counted, Factor};
-use crate::lane_table::LaneTable;
 use crate::lanes::{Lanes, on_lanes};
+use crate::littlewood_richardson::{Budget, Stopped};
 use crate::multiplicities::multiplicities;
 use crate::{Decomposition, Error, Family, Irrep, Limits, SimpleAlgebra, littlewood_richardson};
 
@@ -272,24 +272,31 @@ fn by_reflection<L: Lanes>(
     }))
 }
 
-/// The product of two irreps of SU(N) by Young tableaux; `None` where it takes more than `budget`
-/// steps.
+/// The product of two irreps of SU(N) by Young tableaux; `None` where it takes more steps.
 fn by_tableaux<L: Lanes>(
     large: &Irrep,
     small: &Irrep,
-    budget: u64,
+    steps: u64,
     limits: &Limits,
 ) -> Result<Option<Decomposition>, Error> {
     let rows = littlewood_richardson::rows;
-    let (base, added) = (rows(large.labels()), rows(small.labels()));
-    let terms: Option<LaneTable<L, u64>> =
-        littlewood_richardson::product(&base, &added, budget, limits.terms());
-    let Some(terms) = terms else { return Ok(None) };
-    if terms.len() > limits.terms() {
-        return Err(limits.too_many_terms(format!("more than {}", limits.terms())));
+    let budget = Budget {
+        steps,
+        terms: limits.terms(),
+    };
+    match littlewood_richardson::product::<L>(&rows(large.labels()), &rows(small.labels()), budget)
+    {
+        Err(Stopped::Budget) => Ok(None),
+        Err(Stopped::Terms) => {
+            // As many terms as weights, and those as many as the dimension, at most.
+            let weights = large.dimension().min(small.dimension());
+            Err(limits.too_many_terms(weights))
+        }
+        Ok(terms) => {
+            let terms = terms.collect(|weight, &n| Some((weight.clone(), i128::from(n))));
+            Ok(Decomposition::from_counts(large.algebra(), terms))
+        }
     }
-    let terms = terms.collect(|weight, &n| Some((weight.clone(), i128::from(n))));
-    Ok(Decomposition::from_counts(large.algebra(), terms))
 }
 
 /// Steps that tableaux may take before reflection is tried. There are at least as many weights as

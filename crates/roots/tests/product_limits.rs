@@ -39,6 +39,26 @@ fn limits_are_named_and_can_be_raised() {
     );
 }
 
+/// Tableaux stop at the limit on terms, and at a depth that any stack has room for.
+#[test]
+fn tableaux_stop_in_time() {
+    let su2 = algebra("SU(2)");
+    let large = su2.irrep(&[2_000_000_000]).unwrap();
+    let few = Limits::default().with_terms(1000);
+    let error = large.product_within(&large, &few).unwrap_err().to_string();
+    assert!(error.contains("up to 2000000001 terms"), "{error}");
+    let su257 = SimpleAlgebra::su(257).unwrap();
+    let fundamental = |node: usize| {
+        let labels: Vec<u32> = (0..256).map(|i| u32::from(i == node)).collect();
+        su257.irrep(&labels).unwrap()
+    };
+    let product = fundamental(255).product(&fundamental(255)).unwrap();
+    assert_eq!(product.len(), 2);
+    let half = fundamental(127);
+    let limits = Limits::default().with_weights(1_000_000);
+    assert!(half.product_within(&half, &limits).is_err());
+}
+
 #[test]
 fn factors_of_another_algebra() {
     let (su5, so10) = (algebra("SU(5)"), algebra("SO(10)"));
