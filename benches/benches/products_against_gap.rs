@@ -4,6 +4,9 @@
 //! reflection is one visit to each weight of the smaller factor: the last column says how many
 //! nanoseconds a visit takes, everything counted.
 
+// Times are measured, and printed as decimals.
+#![allow(clippy::float_arithmetic, clippy::cast_precision_loss)]
+
 use std::collections::BTreeMap;
 use std::time::Duration;
 
@@ -88,7 +91,6 @@ fn weight_system(case: &WeightCase, answer: Option<&Answer>) -> Option<f64> {
     row(&case.name, took, ours.len() as u64, &ours, answer)
 }
 
-#[allow(clippy::float_arithmetic, clippy::cast_precision_loss)]
 fn row(
     name: &str,
     took: Duration,

@@ -36,7 +36,6 @@ pub fn microseconds(time: Duration) -> f64 {
 
 /// The geometric mean.
 #[must_use]
-#[allow(clippy::float_arithmetic, clippy::cast_precision_loss)]
 pub fn geometric_mean(ratios: &[f64]) -> f64 {
     (ratios.iter().map(|ratio| ratio.ln()).sum::<f64>() / ratios.len() as f64).exp()
 }

@@ -302,11 +302,12 @@ fn product_weights<L: Lanes>(
     let mut walked = 0u64;
     for (weight, times) in &right.weights {
         walk.restart(pack(weight));
-        while let Some(other) = walk.next_weight(frame) {
+        while walk.step(frame, |other| {
             for (start, size) in &starts {
-                *sums.at(&dominant(frame, start.plus(&other))) += size * times;
+                *sums.at(&dominant(frame, start.plus(other))) += size * times;
             }
             walked += starts.len() as u64;
+        }) {
             if walked > limits.weights() {
                 return Err(limits.too_many_weights(format!("more than {walked}")));
             }

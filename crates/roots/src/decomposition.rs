@@ -76,9 +76,9 @@ impl Decomposition {
     /// From highest weights with counts, in any order; `None` where a count is negative.
     pub(crate) fn from_counts<L: Lanes, C: Count>(
         algebra: SimpleAlgebra,
-        counts: impl Iterator<Item = (L, C)>,
+        mut counts: Vec<(L, C)>,
     ) -> Option<Self> {
-        let mut counts: Vec<(L, C)> = counts.filter(|(_, count)| !count.is_zero()).collect();
+        counts.retain(|(_, count)| !count.is_zero());
         counts.sort_unstable_by(|(left, _), (right, _)| left.compare(right));
         let term = |(weight, count): (L, C)| {
             let multiplicity = match count.to_u64() {
@@ -155,10 +155,7 @@ impl Decomposition {
 
 /// The irrep with that highest weight.
 pub(crate) fn irrep_of<L: Lanes>(algebra: SimpleAlgebra, highest: &L) -> Irrep {
-    Irrep::from_fn(algebra, |node| {
-        // Products and powers are refused where a label of theirs could leave u32.
-        u32::try_from(highest.label(node)).expect("labels of a dominant weight fit")
-    })
+    Irrep::from_labels(algebra, highest.dominant_labels(algebra.rank()))
 }
 
 /// The highest weight of an irrep.

@@ -50,18 +50,26 @@ pub(crate) struct FrameRoot<L> {
     pub(crate) support: u32,
 }
 
-/// The roots of one simple algebra in lanes.
+/// The simple roots of one algebra in lanes, and what follows from them once it is asked for.
 #[derive(Debug)]
 pub(crate) struct Frame<L> {
+    cartan_type: CartanType,
     rank: usize,
     pub(crate) simple_roots: Vec<L>,
-    pub(crate) positive_roots: Vec<FrameRoot<L>>,
     /// All labels one, in every lane: rho, with the unused lanes filled.
     pub(crate) rho: L,
     /// For each node, the joined nodes behind it.
     later_neighbours: Vec<Vec<usize>>,
     /// `2 (mu, rho-check)` is the sum of these times the labels of mu.
     twice_rho_check: Vec<i64>,
+    depth: OnceLock<Depth<L>>,
+}
+
+/// The positive roots and lengths. At high rank they take memory, and a product with a minuscule
+/// irrep such as a vector or spinor does without them.
+#[derive(Debug)]
+struct Depth<L> {
+    positive_roots: Vec<FrameRoot<L>>,
     /// Rows of the metric, shortest root squared 2, times `metric_scale`.
     metric: Vec<i64>,
     metric_scale: i64,
@@ -70,100 +78,26 @@ pub(crate) struct Frame<L> {
     subgroup_orders: Vec<u64>,
 }
 
-impl<L: Lanes> Frame<L> {
-    pub(crate) fn new(cartan_type: CartanType) -> Self {
+impl<L: Lanes> Depth<L> {
+    fn new(cartan_type: CartanType) -> Self {
         let algebra = SimpleAlgebra::new(cartan_type);
-        let rank = algebra.rank();
-        let matrix = algebra.cartan_matrix();
         let system = algebra.root_system();
         let ratios = algebra.dynkin_diagram().length_ratios().to_vec();
         let longest = ratios.iter().copied().max().map_or(1, i64::from);
         let metric = WeightMetric::of(algebra);
-        let simple = |row: &[i8]| L::pack(row.iter().map(|&entry| entry.into()));
-        let mut twice_rho_check = vec![0; rank];
-        for root in system.positive_roots() {
-            let coroot = twice_rho_check.iter_mut().zip(root.coroot());
-            coroot.for_each(|(sum, &c)| *sum += i64::from(c));
-        }
-        let joined = |i: usize| (i + 1..rank).filter(|&j| matrix[(i, j)] != 0).collect();
-        let mut frame = Self {
-            rank,
-            simple_roots: matrix.rows().map(simple).collect(),
+        let mut depth = Self {
             positive_roots: positive_roots(&system, algebra, &ratios),
-            rho: L::all_ones(rank),
-            later_neighbours: (0..rank).map(joined).collect(),
-            twice_rho_check,
             metric: metric.rows().flatten().copied().collect(),
             // The metric's own unit has the longest root squared 2.
             metric_scale: metric.denominator() / longest,
             heights: system.positive_roots().map(|root| root.height()).collect(),
             subgroup_orders: Vec::new(),
         };
-        if rank <= 8 {
-            let sets = 0..1u32 << rank;
-            frame.subgroup_orders = sets.map(|nodes| frame.count_subgroup(nodes)).collect();
+        if algebra.rank() <= 8 {
+            let sets = 0..1u32 << algebra.rank();
+            depth.subgroup_orders = sets.map(|nodes| depth.count_subgroup(nodes)).collect();
         }
-        frame
-    }
-
-    /// The frame in its place of `held`, made where it is not there yet.
-    pub(crate) fn held_in(held: &'static [OnceLock<Self>; PLACES], of: CartanType) -> Held<L> {
-        if of.rank() > HELD_RANK {
-            return Held::Own(Arc::new(Self::new(of)));
-        }
-        let place = of.family() as usize * (HELD_RANK + 1) + of.rank();
-        Held::Static(held[place].get_or_init(|| Self::new(of)))
-    }
-
-    pub(crate) const fn rank(&self) -> usize {
-        self.rank
-    }
-
-    pub(crate) fn later_neighbours(&self, node: usize) -> &[usize] {
-        &self.later_neighbours[node]
-    }
-
-    /// `2 (mu, rho-check)`: twice the height, up to a constant, of a weight below another.
-    pub(crate) fn level(&self, weight: &L) -> i64 {
-        let coefficients = self.twice_rho_check.iter().enumerate();
-        coefficients.map(|(i, &c)| c * weight.label(i)).sum()
-    }
-
-    /// By how much [`scaled_norm`](Self::scaled_norm) is larger than the norm with the shortest
-    /// root squared 2.
-    pub(crate) const fn metric_scale(&self) -> i64 {
-        self.metric_scale
-    }
-
-    /// The squared length of a weight, times [`metric_scale`](Self::metric_scale).
-    ///
-    /// Labels below 2^33 and at most 256 nodes keep it below 2^100.
-    pub(crate) fn scaled_norm(&self, weight: &L) -> i128 {
-        let rows = self.metric.chunks(self.rank).enumerate();
-        let terms = rows.map(|(i, row)| {
-            let row = row.iter().enumerate();
-            let paired: i128 = row
-                .map(|(j, &g)| i128::from(g) * i128::from(weight.label(j)))
-                .sum();
-            paired * i128::from(weight.label(i))
-        });
-        terms.sum()
-    }
-
-    /// The nodes where the weight has label 0, as bits.
-    pub(crate) fn zeros(&self, weight: &L) -> u32 {
-        (0..self.rank)
-            .filter(|&i| weight.label(i) == 0)
-            .fold(0, |nodes, i| nodes | 1 << i)
-    }
-
-    /// Order of the subgroup generated by the reflections at a set of nodes, rank at most
-    /// [`HELD_RANK`].
-    pub(crate) fn subgroup_order(&self, nodes: u32) -> u64 {
-        match self.subgroup_orders.get(nodes as usize) {
-            Some(&order) => order,
-            None => self.count_subgroup(nodes),
-        }
+        depth
     }
 
     /// The product of the exponents, each plus one; as many exponents are at least h as there are
@@ -179,6 +113,114 @@ impl<L: Lanes> Frame<L> {
         (1..=highest)
             .map(|h| (h as u64 + 1).pow(at_height[h] - at_height[h + 1]))
             .product()
+    }
+}
+
+impl<L: Lanes> Frame<L> {
+    pub(crate) fn new(cartan_type: CartanType) -> Self {
+        let algebra = SimpleAlgebra::new(cartan_type);
+        let rank = algebra.rank();
+        let matrix = algebra.cartan_matrix();
+        let simple = |row: &[i8]| L::pack(row.iter().map(|&entry| entry.into()));
+        let joined = |i: usize| (i + 1..rank).filter(|&j| matrix[(i, j)] != 0).collect();
+        Self {
+            cartan_type,
+            rank,
+            simple_roots: matrix.rows().map(simple).collect(),
+            rho: L::all_ones(rank),
+            later_neighbours: (0..rank).map(joined).collect(),
+            twice_rho_check: twice_rho_check(cartan_type),
+            depth: OnceLock::new(),
+        }
+    }
+
+    fn depth(&self) -> &Depth<L> {
+        self.depth.get_or_init(|| Depth::new(self.cartan_type))
+    }
+
+    pub(crate) fn positive_roots(&self) -> &[FrameRoot<L>] {
+        &self.depth().positive_roots
+    }
+
+    /// The frame in its place of `held`, made where it is not there yet.
+    pub(crate) fn held_in(held: &'static [OnceLock<Self>; PLACES], of: CartanType) -> Held<L> {
+        if of.rank() > HELD_RANK {
+            return Held::Own(Arc::new(Self::new(of)));
+        }
+        let place = of.family() as usize * (HELD_RANK + 1) + of.rank();
+        Held::Static(held[place].get_or_init(|| Self::new(of)))
+    }
+
+    pub(crate) const fn cartan_type(&self) -> CartanType {
+        self.cartan_type
+    }
+
+    pub(crate) const fn rank(&self) -> usize {
+        self.rank
+    }
+
+    pub(crate) fn later_neighbours(&self, node: usize) -> &[usize] {
+        &self.later_neighbours[node]
+    }
+
+    /// `2 (mu, rho-check)`: twice the height, up to a constant, of a weight below another.
+    pub(crate) fn level(&self, weight: &L) -> i64 {
+        let labels = weight.labels(self.rank);
+        let terms = self.twice_rho_check.iter().zip(&labels);
+        terms.map(|(c, label)| c * label).sum()
+    }
+
+    /// By how much [`scaled_norm`](Self::scaled_norm) is larger than the norm with the shortest
+    /// root squared 2.
+    pub(crate) fn metric_scale(&self) -> i64 {
+        self.depth().metric_scale
+    }
+
+    /// The squared length of a weight, times [`metric_scale`](Self::metric_scale).
+    ///
+    /// Labels below 2^33 and at most 256 nodes keep it below 2^100.
+    pub(crate) fn scaled_norm(&self, weight: &L) -> i128 {
+        let labels = weight.labels(self.rank);
+        let rows = self.depth().metric.chunks(self.rank).zip(&labels);
+        if L::NARROW {
+            let norm: i64 = rows
+                .map(|(row, label)| {
+                    let paired: i64 = row.iter().zip(&labels).map(|(g, label)| g * label).sum();
+                    paired * label
+                })
+                .sum();
+            return norm.into();
+        }
+        rows.map(|(row, &label)| {
+            let terms = row.iter().zip(&labels);
+            let paired: i128 = terms
+                .map(|(&g, &label)| i128::from(g) * i128::from(label))
+                .sum();
+            paired * i128::from(label)
+        })
+        .sum()
+    }
+
+    /// Whether a dominant weight is the only one of its irrep, which has then one orbit of weights:
+    /// no label of it is larger than one.
+    pub(crate) fn is_minuscule(&self, dominant: &L) -> bool {
+        let labels = (0..self.rank).map(|i| dominant.label(i).unsigned_abs());
+        largest_label(self.cartan_type, labels) <= 1
+    }
+
+    /// The nodes where the weight has label 0, as bits.
+    pub(crate) fn zeros(&self, weight: &L) -> u32 {
+        (0..self.rank)
+            .filter(|&i| weight.label(i) == 0)
+            .fold(0, |nodes, i| nodes | 1 << i)
+    }
+
+    /// Order of the subgroup generated by the reflections at a set of nodes, rank at most
+    /// [`HELD_RANK`].
+    pub(crate) fn subgroup_order(&self, nodes: u32) -> u64 {
+        let depth = self.depth();
+        let known = depth.subgroup_orders.get(nodes as usize).copied();
+        known.unwrap_or_else(|| depth.count_subgroup(nodes))
     }
 
     /// Number of weights in the orbit of a dominant weight, rank at most [`HELD_RANK`].
@@ -218,6 +260,31 @@ fn positive_roots<L: Lanes>(
         }
     };
     system.positive_roots().map(frame_root).collect()
+}
+
+/// Coefficients of the sum of the positive coroots in simple coroots: plates I to IX of
+/// [Bourbaki 1968], for the dual type.
+fn twice_rho_check(cartan_type: CartanType) -> Vec<i64> {
+    use crate::Family::{A, B, C, D};
+    let n = i64::try_from(cartan_type.rank()).expect("ranks are small");
+    let classical = |i: i64| match cartan_type.family() {
+        A => Some(i * (n + 1 - i)),
+        B if i == n => Some(n * (n + 1) / 2),
+        B => Some(i * (2 * n + 1 - i)),
+        C => Some(i * (2 * n - i)),
+        D if i + 1 >= n => Some(n * (n - 1) / 2),
+        D => Some(i * (2 * n - 1 - i)),
+        _ => None,
+    };
+    if let Some(known) = (1..=n).map(classical).collect() {
+        return known;
+    }
+    let mut sum = vec![0; cartan_type.rank()];
+    for root in RootSystem::exceptional(cartan_type).positive_roots() {
+        let coroot = sum.iter_mut().zip(root.coroot());
+        coroot.for_each(|(sum, &c)| *sum += i64::from(c));
+    }
+    sum
 }
 
 /// The largest size of a label anywhere in the orbit of a dominant weight: its pairing with the

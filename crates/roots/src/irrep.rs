@@ -53,6 +53,12 @@ impl Irrep {
         }
     }
 
+    /// The irrep with these labels, one per node.
+    pub(crate) fn from_labels(algebra: SimpleAlgebra, labels: SmallVec<[u32; 8]>) -> Self {
+        debug_assert_eq!(labels.len(), algebra.rank(), "one label per node");
+        Self { algebra, labels }
+    }
+
     /// The algebra it belongs to.
     #[must_use]
     pub const fn algebra(&self) -> SimpleAlgebra {

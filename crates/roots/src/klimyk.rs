@@ -47,14 +47,15 @@ pub(crate) fn times<L: Lanes, C: Count>(
     let mut walk = OrbitWalk::new();
     for (dominant, multiplicity) in factor.multiplicities.iter() {
         walk.restart(dominant.times(scale));
-        while let Some(weight) = walk.next_weight(frame) {
+        while walk.step(frame, |weight| {
             for (highest, count) in &shifted {
-                let Some((term, odd)) = strictly_dominant(frame, highest.plus(&weight)) else {
+                let Some((term, odd)) = strictly_dominant(frame, highest.plus(weight)) else {
                     continue;
                 };
                 let product = count.clone() * multiplicity.clone();
                 *terms.at(&term) += if odd { -product } else { product };
             }
+        }) {
             if terms.len() > limits.terms() {
                 return Err(limits.too_many_terms(walked));
             }
@@ -96,8 +97,9 @@ fn fits<L, C: Count>(sum: &[(L, C)], factor: &Factor<L, C>) -> bool {
 /// The entries with rho taken off again.
 pub(crate) fn unshifted<L: Lanes, C: Count>(
     frame: &Frame<L>,
-    terms: LaneTable<L, C>,
-) -> impl Iterator<Item = (L, C)> {
-    let entries = terms.into_entries().filter(|(_, count)| !count.is_zero());
-    entries.map(|(shifted, count)| (shifted.minus(&frame.rho), count))
+    terms: &LaneTable<L, C>,
+) -> Counted<L, C> {
+    terms.collect(|shifted, count| {
+        (!count.is_zero()).then(|| (shifted.minus(&frame.rho), count.clone()))
+    })
 }

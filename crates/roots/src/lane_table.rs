@@ -69,7 +69,9 @@ impl<L: Lanes, V: Clone + Default> LaneTable<L, V> {
 
     #[cold]
     fn grow(&mut self) {
-        let mut larger = Self::with_places(4 * self.places.len());
+        // Large tables are paid for by the page.
+        let factor = if self.places.len() < 4096 { 4 } else { 2 };
+        let mut larger = Self::with_places(factor * self.places.len());
         let vacant = L::vacant();
         for (key, value) in self.places.drain(..).filter(|(key, _)| *key != vacant) {
             *larger.at(&key) = value;
@@ -83,5 +85,17 @@ impl<L: Lanes, V: Clone + Default> LaneTable<L, V> {
         self.places
             .into_iter()
             .filter(move |(key, _)| *key != vacant)
+    }
+
+    /// The entries that `keep` makes something of, in no particular order.
+    pub(crate) fn collect<T>(&self, keep: impl Fn(&L, &V) -> Option<T>) -> Vec<T> {
+        let vacant = L::vacant();
+        let mut kept = Vec::with_capacity(self.held);
+        for (key, value) in &self.places {
+            if *key != vacant {
+                kept.extend(keep(key, value));
+            }
+        }
+        kept
     }
 }

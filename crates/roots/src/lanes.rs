@@ -17,6 +17,10 @@ use crate::frame::{Frame, Held};
 /// A weight by its Dynkin labels. The lanes beyond the rank hold what [`pack`](Self::pack) and
 /// [`all_ones`](Self::all_ones) put there; no root reaches them.
 pub(crate) trait Lanes: Clone + Eq + Debug + Send + Sync + 'static {
+    /// Whether all labels are below 2^15 in size and all ranks at most 16, so that squared lengths
+    /// are far below 2^63.
+    const NARROW: bool;
+
     /// Whether weights of that rank, all labels at most `bound` in size, can be held.
     fn holds(rank: usize, bound: u64) -> bool;
 
@@ -47,8 +51,20 @@ pub(crate) trait Lanes: Clone + Eq + Debug + Send + Sync + 'static {
     /// Whether a lane is zero, the unused ones counted.
     fn has_zero(&self) -> bool;
 
-    /// The nodes below `end` with a positive label, and the label.
-    fn for_positive(&self, end: usize, take: impl FnMut(usize, i64));
+    /// The nodes from `start` on and below `end` with a positive label, and the label.
+    fn for_positive(&self, start: usize, end: usize, take: impl FnMut(usize, i64));
+
+    /// The labels of a dominant weight. They are known to be within `u32`.
+    fn dominant_labels(&self, rank: usize) -> SmallVec<[u32; 8]> {
+        // Products and powers are refused where a label of theirs could leave u32.
+        let label = |node| u32::try_from(self.label(node)).expect("labels are within the bound");
+        (0..rank).map(label).collect()
+    }
+
+    /// The labels.
+    fn labels(&self, rank: usize) -> SmallVec<[i64; 8]> {
+        (0..rank).map(|node| self.label(node)).collect()
+    }
 
     /// A well mixed number, for tables.
     fn mixed(&self) -> u64;
@@ -99,6 +115,8 @@ macro_rules! packed {
         }
 
         impl Lanes for $name {
+            const NARROW: bool = true;
+
             fn holds(rank: usize, bound: u64) -> bool {
                 rank <= $lanes && bound < 1 << ($bits - 1)
             }
@@ -158,7 +176,7 @@ macro_rules! packed {
             }
 
             #[inline]
-            fn for_positive(&self, end: usize, mut take: impl FnMut(usize, i64)) {
+            fn for_positive(&self, start: usize, end: usize, mut take: impl FnMut(usize, i64)) {
                 let biased = self.0.wrapping_add(Self::BIAS);
                 // One less is not negative: positive.
                 let positive = biased.wrapping_sub(Self::ONES) & Self::BIAS;
@@ -167,11 +185,37 @@ macro_rules! packed {
                 } else {
                     positive
                 };
+                left &= <$word>::MAX << ($bits * start);
                 while left != 0 {
                     let node = left.trailing_zeros() as usize / $bits;
                     take(node, Self::at(biased, node));
                     left &= left - 1;
                 }
+            }
+
+            #[allow(clippy::cast_possible_truncation, clippy::cast_sign_loss)]
+            fn dominant_labels(&self, rank: usize) -> SmallVec<[u32; 8]> {
+                let biased = self.0.wrapping_add(Self::BIAS);
+                if rank <= 8 {
+                    let mut labels = [0; 8];
+                    for (node, label) in labels.iter_mut().enumerate().take($lanes) {
+                        *label = Self::at(biased, node) as u32;
+                    }
+                    return SmallVec::from_buf_and_len(labels, rank);
+                }
+                (0..rank).map(|node| Self::at(biased, node) as u32).collect()
+            }
+
+            fn labels(&self, rank: usize) -> SmallVec<[i64; 8]> {
+                let biased = self.0.wrapping_add(Self::BIAS);
+                if rank <= 8 {
+                    let mut labels = [0; 8];
+                    for (node, label) in labels.iter_mut().enumerate().take($lanes) {
+                        *label = Self::at(biased, node);
+                    }
+                    return SmallVec::from_buf_and_len(labels, rank);
+                }
+                (0..rank).map(|node| Self::at(biased, node)).collect()
             }
 
             #[inline]
@@ -233,6 +277,8 @@ impl Wide {
 }
 
 impl Lanes for Wide {
+    const NARROW: bool = false;
+
     fn holds(_rank: usize, bound: u64) -> bool {
         bound < 1 << 60
     }
@@ -277,8 +323,8 @@ impl Lanes for Wide {
         self.0.contains(&0)
     }
 
-    fn for_positive(&self, end: usize, mut take: impl FnMut(usize, i64)) {
-        for (node, &label) in self.0.iter().enumerate().take(end) {
+    fn for_positive(&self, start: usize, end: usize, mut take: impl FnMut(usize, i64)) {
+        for (node, &label) in self.0.iter().enumerate().take(end).skip(start) {
             if label > 0 {
                 take(node, label);
             }

@@ -24,12 +24,12 @@ pub struct Limits {
 }
 
 impl Default for Limits {
-    /// Two million terms (about 200 MB), as many dominant weights, and 20 thousand million
+    /// Two million terms (about 200 MB), 200 thousand dominant weights, and 20 thousand million
     /// weights (minutes).
     fn default() -> Self {
         Self {
             terms: 2_000_000,
-            dominant_weights: 2_000_000,
+            dominant_weights: 200_000,
             weights: 20_000_000_000,
         }
     }
@@ -78,7 +78,7 @@ impl Limits {
     pub(crate) fn too_many_terms(&self, at_most: impl std::fmt::Display) -> Error {
         Error::BeyondLimit {
             what: "the list of irreps".to_owned(),
-            size: format!("up to {at_most} terms"),
+            size: format!("up to {} terms", short(&at_most)),
             limit: self.terms as u64,
             instead: "take smaller irreps, or raise the limit on terms".to_owned(),
         }
@@ -87,9 +87,19 @@ impl Limits {
     pub(crate) fn too_many_weights(&self, number: impl std::fmt::Display) -> Error {
         Error::BeyondLimit {
             what: "this product".to_owned(),
-            size: format!("a walk through {number} weights"),
+            size: format!("a walk through {} weights", short(&number)),
             limit: self.weights,
             instead: "take smaller irreps, or raise the limit on weights".to_owned(),
         }
+    }
+}
+
+/// A number as it is, or its order of magnitude where it has more than twenty digits.
+fn short(number: &impl std::fmt::Display) -> String {
+    let digits = number.to_string();
+    if digits.len() > 20 && digits.bytes().all(|digit| digit.is_ascii_digit()) {
+        format!("10^{}", digits.len())
+    } else {
+        digits
     }
 }

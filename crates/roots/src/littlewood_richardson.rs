@@ -12,40 +12,71 @@ pub(crate) fn rows(labels: &[u32]) -> Vec<i64> {
     rows
 }
 
-/// The product of the irreps with diagrams `base` and `added`, by highest weights; `None` where
-/// it takes more than `budget` steps.
+/// Why a filling was given up.
+#[derive(Clone, Copy, Debug, PartialEq, Eq)]
+pub(crate) enum Stopped {
+    /// It takes more steps, or a deeper recursion, than allowed.
+    Budget,
+    /// There are more terms than allowed.
+    Terms,
+}
+
+/// How much a filling may take.
+#[derive(Clone, Copy, Debug)]
+pub(crate) struct Budget {
+    pub(crate) steps: u64,
+    pub(crate) terms: usize,
+}
+
+/// Rows of both diagrams multiplied, at most: the depth of the recursion, kept well within the
+/// smallest stack that a thread is given.
+const DEEPEST: usize = 3000;
+
+/// The product of two irreps by their diagrams, the one with fewer rows put on the other, by
+/// highest weights.
 ///
-/// The boxes of `added` are put on `base`, those of its first row first, no two of one row in one
-/// column, so that read from the right, row by row from the top, each row's boxes never outnumber
-/// those of the row above.
+/// The boxes of one diagram are put on the other, those of its first row first, no two of one row
+/// in one column, so that read from the right, row by row from the top, each row's boxes never
+/// outnumber those of the row above.
 ///
+/// # Errors
+/// [`Stopped`] where it takes more than `budget`.
 /// # Cost
-/// At most N steps per tableau, which are as many as the multiplicities add up to, and those of
-/// tableaux that cannot be finished.
+/// At most N steps per row of the smaller diagram for each tableau, of which there are as many as
+/// the multiplicities add up to, and those of tableaux that cannot be finished.
 /// # Source
 /// [Littlewood-Richardson 1934]; [Fulton 1997], 5.2.
 pub(crate) fn product<L: Lanes>(
-    base: &[i64],
-    added: &[i64],
-    budget: u64,
-) -> Option<LaneTable<L, u64>> {
-    let last = added.iter().rposition(|&row| row > 0);
+    left: &[i64],
+    right: &[i64],
+    budget: Budget,
+) -> Result<LaneTable<L, u64>, Stopped> {
+    let height = |rows: &[i64]| rows.iter().filter(|&&row| row > 0).count();
+    let (base, added) = if height(left) < height(right) {
+        (right, left)
+    } else {
+        (left, right)
+    };
+    let height = height(added);
+    if height * base.len() > DEEPEST {
+        return Err(Stopped::Budget);
+    }
     let mut filling = Filling {
         shape: base.to_vec(),
         before: base.to_vec(),
         added,
-        last: last.unwrap_or(0),
+        last: height.saturating_sub(1),
         above: vec![0; base.len()],
-        steps_left: budget,
+        steps_left: budget.steps,
+        most_terms: budget.terms,
         terms: LaneTable::for_entries(16),
     };
-    let whole = if last.is_none() {
-        filling.keep();
-        Some(())
+    if height == 0 {
+        filling.keep()?;
     } else {
-        filling.row_of_boxes(0)
-    };
-    whole.map(|()| filling.terms)
+        filling.row_of_boxes(0)?;
+    }
+    Ok(filling.terms)
 }
 
 struct Filling<'a, L> {
@@ -59,12 +90,13 @@ struct Filling<'a, L> {
     /// How many boxes of the row before the current one lie in each row of the diagram.
     above: Vec<i64>,
     steps_left: u64,
+    most_terms: usize,
     terms: LaneTable<L, u64>,
 }
 
 impl<L: Lanes> Filling<'_, L> {
     /// Puts on the boxes of row `value` of `added`, and then the rest.
-    fn row_of_boxes(&mut self, value: usize) -> Option<()> {
+    fn row_of_boxes(&mut self, value: usize) -> Result<(), Stopped> {
         let outer = std::mem::replace(&mut self.before, self.shape.clone());
         let mut placed = vec![0; self.shape.len()];
         let done = self.place(value, value, self.added[value], 0, &mut placed);
@@ -81,13 +113,13 @@ impl<L: Lanes> Filling<'_, L> {
         left: i64,
         allowance: i64,
         placed: &mut Vec<i64>,
-    ) -> Option<()> {
-        self.steps_left = self.steps_left.checked_sub(1)?;
+    ) -> Result<(), Stopped> {
+        self.steps_left = self.steps_left.checked_sub(1).ok_or(Stopped::Budget)?;
         if left == 0 {
             return self.finish(value, placed);
         }
         if row == self.shape.len() {
-            return Some(());
+            return Ok(());
         }
         let allowance = if value == 0 {
             left
@@ -100,20 +132,22 @@ impl<L: Lanes> Filling<'_, L> {
             self.before[row - 1] - self.before[row]
         };
         let most = left.min(room).min(allowance);
-        for boxes in 0..=most {
+        // The rows below have room for no more than the row is longer than the last one.
+        let last = self.before[self.before.len() - 1];
+        let least = (left - (self.before[row] - last)).max(0);
+        for boxes in least..=most {
             self.shape[row] = self.before[row] + boxes;
             placed[row] = boxes;
             self.place(value, row + 1, left - boxes, allowance - boxes, placed)?;
         }
         self.shape[row] = self.before[row];
         placed[row] = 0;
-        Some(())
+        Ok(())
     }
 
-    fn finish(&mut self, value: usize, placed: &mut Vec<i64>) -> Option<()> {
+    fn finish(&mut self, value: usize, placed: &mut Vec<i64>) -> Result<(), Stopped> {
         if value == self.last {
-            self.keep();
-            return Some(());
+            return self.keep();
         }
         std::mem::swap(&mut self.above, placed);
         let done = self.row_of_boxes(value + 1);
@@ -121,8 +155,12 @@ impl<L: Lanes> Filling<'_, L> {
         done
     }
 
-    fn keep(&mut self) {
+    fn keep(&mut self) -> Result<(), Stopped> {
         let labels = self.shape.windows(2).map(|rows| rows[0] - rows[1]);
         *self.terms.at(&L::pack(labels)) += 1;
+        if self.terms.len() > self.most_terms {
+            return Err(Stopped::Terms);
+        }
+        Ok(())
     }
 }

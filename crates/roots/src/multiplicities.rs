@@ -3,7 +3,7 @@
 use crate::Error;
 use crate::count::Count;
 use crate::dominant_weights::DominantWeights;
-use crate::frame::{Frame, HELD_RANK};
+use crate::frame::{Frame, FrameRoot, HELD_RANK};
 use crate::lanes::Lanes;
 use crate::orbit_walk::dominant;
 
@@ -40,7 +40,7 @@ pub(crate) enum RootSum {
 /// where one does not fit in `C`.
 ///
 /// # Errors
-/// [`Error::TooMany`] where there are more than `limit` dominant weights.
+/// [`Error::BeyondLimit`] where there are more than `limit` dominant weights.
 pub(crate) fn multiplicities<L: Lanes, C: Count>(
     frame: &Frame<L>,
     highest: &L,
@@ -67,6 +67,9 @@ pub(crate) fn recursion<L: Lanes, C: Count>(
         weights,
         counts: vec![C::one()],
     };
+    if known.weights.weights().len() == 1 {
+        return Some(known);
+    }
     let highest = known.weights.weights().first()?;
     let top = frame.scaled_norm(&highest.plus(&frame.rho));
     for place in 1..known.weights.weights().len() {
@@ -89,9 +92,10 @@ fn plain_sum<L: Lanes, C: Count>(
     known: &DominantMultiplicities<L, C>,
     weight: &L,
 ) -> Option<C> {
-    let mut roots = frame.positive_roots.iter();
+    let labels = weight.labels(frame.rank());
+    let mut roots = frame.positive_roots().iter();
     roots.try_fold(C::zero(), |sum, root| {
-        sum.checked_add(&string_sum(frame, known, weight, root)?)
+        sum.checked_add(&string_sum(frame, known, weight, &labels, root)?)
     })
 }
 
@@ -104,13 +108,14 @@ fn folded_sum<L: Lanes, C: Count>(
     weight: &L,
 ) -> Option<C> {
     let zeros = frame.zeros(weight);
+    let labels = weight.labels(frame.rank());
     let stabiliser = frame.subgroup_order(zeros);
     let mut sum = C::zero();
-    for root in &frame.positive_roots {
+    for root in frame.positive_roots() {
         if !weight.plus(&root.clipped).is_dominant() {
             continue;
         }
-        let along = string_sum(frame, known, weight, root)?;
+        let along = string_sum(frame, known, weight, &labels, root)?;
         if along.is_zero() {
             continue;
         }
@@ -127,10 +132,11 @@ fn string_sum<L: Lanes, C: Count>(
     frame: &Frame<L>,
     known: &DominantMultiplicities<L, C>,
     weight: &L,
-    root: &crate::frame::FrameRoot<L>,
+    labels: &[i64],
+    root: &FrameRoot<L>,
 ) -> Option<C> {
-    let pairing = root.pairing.iter().enumerate();
-    let mut inner: i64 = pairing.map(|(i, &c)| c * weight.label(i)).sum();
+    let pairing = root.pairing.iter().zip(labels);
+    let mut inner: i64 = pairing.map(|(c, label)| c * label).sum();
     let mut along = weight.clone();
     let mut sum = C::zero();
     loop {

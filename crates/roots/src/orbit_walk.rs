@@ -29,32 +29,54 @@ impl<L: Lanes> OrbitWalk<L> {
         self.waiting.push(dominant);
     }
 
+    /// Hands over one or two weights that have not been there yet; `false` when all have.
     #[inline]
-    pub(crate) fn next_weight(&mut self, frame: &Frame<L>) -> Option<L> {
-        let weight = self.waiting.pop()?;
-        push_children(frame, &weight, &mut self.waiting);
-        Some(weight)
+    pub(crate) fn step(&mut self, frame: &Frame<L>, mut take: impl FnMut(&L)) -> bool {
+        let Some(weight) = self.waiting.pop() else {
+            return false;
+        };
+        take(&weight);
+        // What waits has no negative label at the first node: its child there, half of all
+        // weights, needs no waiting, and has children only where it is joined.
+        let label = weight.label(0);
+        if label > 0 {
+            let child = weight.minus(&frame.simple_roots[0].times(label));
+            take(&child);
+            push_behind(frame, &child, 0, &mut self.waiting);
+        }
+        let first = weight.first_negative();
+        let end = first.unwrap_or_else(|| frame.rank());
+        weight.for_positive(1, end, |node, label| {
+            let child = weight.minus(&frame.simple_roots[node].times(label));
+            self.waiting.push(child);
+        });
+        if let Some(first) = first {
+            push_behind(frame, &weight, first, &mut self.waiting);
+        }
+        true
     }
 }
 
 /// The weights whose parent in the tree is `weight`.
-#[inline]
 pub(crate) fn push_children<L: Lanes>(frame: &Frame<L>, weight: &L, into: &mut Vec<L>) {
     let first = weight.first_negative();
-    let end = first.unwrap_or_else(|| frame.rank());
     // Nothing before the first negative label is negative, nor becomes so.
-    weight.for_positive(end, |node, label| {
+    weight.for_positive(0, first.unwrap_or_else(|| frame.rank()), |node, label| {
         into.push(weight.minus(&frame.simple_roots[node].times(label)));
     });
-    let Some(first) = first else { return };
-    // Behind it, only a joined node can lift its label.
+    if let Some(first) = first {
+        push_behind(frame, weight, first, into);
+    }
+}
+
+/// The children behind the first negative label: only a joined node can lift it.
+#[inline]
+fn push_behind<L: Lanes>(frame: &Frame<L>, weight: &L, first: usize, into: &mut Vec<L>) {
     for &node in frame.later_neighbours(first) {
-        let label = weight.label(node);
-        if label > 0 {
-            let child = weight.minus(&frame.simple_roots[node].times(label));
-            if child.first_negative() == Some(node) {
-                into.push(child);
-            }
+        let child = weight.reflected(node, &frame.simple_roots[node]);
+        // Its label there is negative only if the weight's is positive.
+        if child.first_negative() == Some(node) {
+            into.push(child);
         }
     }
 }

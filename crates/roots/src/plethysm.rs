@@ -15,7 +15,7 @@ impl Irrep {
     /// antisymmetric for a single column.
     ///
     /// # Errors
-    /// [`Error::BeyondLimit`] or [`Error::TooMany`] where it is too large for the [`Limits`].
+    /// [`Error::BeyondLimit`] where it is too large for the [`Limits`].
     /// # Cost
     /// For each class of permutations about one product with the irrep, the classes taken
     /// together as Horner's rule takes the terms of a polynomial.
@@ -108,6 +108,7 @@ fn power_in<L: Lanes, C: Count>(
         debug_assert!(rest.is_zero(), "multiplicities are whole");
         (weight, times)
     });
+    let terms = terms.collect();
     Ok(Decomposition::from_counts(irrep.algebra(), terms))
 }
 
@@ -138,7 +139,7 @@ impl<L: Lanes, C: Count> Expansion<'_, L, C> {
                 let scale = length.into();
                 let times = klimyk::times(self.frame, &sum, &self.factor, scale, self.limits)?;
                 let Some(times) = times else { return Ok(None) };
-                sum = klimyk::unshifted(self.frame, times).collect();
+                sum = klimyk::unshifted(self.frame, &times);
             }
             let rest = left - cycles * length;
             if rest != 0 && rest <= length {

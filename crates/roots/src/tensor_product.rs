@@ -2,14 +2,12 @@
 
 use std::collections::HashMap;
 
-use num_bigint::BigUint;
-
 use crate::count::{Count, in_width};
 use crate::decomposition::{highest_weight, irrep_of};
 use crate::frame::{Frame, label_bound};
 use crate::klimyk::{self, Counted, Factor};
-use crate::lane_table::LaneTable;
 use crate::lanes::{Lanes, on_lanes};
+use crate::littlewood_richardson::{Budget, Stopped};
 use crate::multiplicities::multiplicities;
 use crate::{Decomposition, Error, Family, Irrep, Limits, SimpleAlgebra, littlewood_richardson};
 
@@ -17,7 +15,7 @@ impl SimpleAlgebra {
     /// The tensor product of any number of irreps; of none, the singlet.
     ///
     /// # Errors
-    /// [`Error::MixedAlgebras`]; [`Error::BeyondLimit`] or [`Error::TooMany`] where it is too
+    /// [`Error::MixedAlgebras`]; [`Error::BeyondLimit`] where it is too
     /// large for the [`Limits`].
     /// # Cost
     /// For two factors, one reflection per different weight of the smaller one, or for SU(N) one
@@ -137,7 +135,7 @@ fn product_in<L: Lanes>(
         [left, right] => product_of_two(algebra, frame, left, right, limits),
         _ => Ok(in_width!(Counts => {
             let sum = many::<L, Counts>(frame, factors, limits)?;
-            sum.and_then(|sum| Decomposition::from_counts(algebra, sum.into_iter()))
+            sum.and_then(|sum| Decomposition::from_counts(algebra, sum))
         })),
     }
 }
@@ -167,7 +165,7 @@ fn many<L: Lanes, C: Count>(
             return Ok(None);
         };
         match klimyk::times(frame, &sum, factor, 1, limits)? {
-            Some(terms) => sum = klimyk::unshifted(frame, terms).collect(),
+            Some(terms) => sum = klimyk::unshifted(frame, &terms),
             None => return Ok(None),
         }
     }
@@ -228,17 +226,38 @@ fn product_of_two<L: Lanes>(
     right: &Irrep,
     limits: &Limits,
 ) -> Result<Decomposition, Error> {
-    let (large, small) = if left.dimension() < right.dimension() {
+    // The height of the highest weight over the lowest: a cheap measure of the number of weights.
+    let level = |irrep: &Irrep| frame.level(&highest_weight::<L>(irrep));
+    let (large, small) = if level(left) < level(right) {
         (right, left)
     } else {
         (left, right)
     };
-    if let Some(terms) = by_young_diagrams(large, small) {
-        let terms = terms.into_entries();
-        let terms = terms.map(|(weight, n): (L, u64)| (weight, i128::from(n)));
-        let product = Decomposition::from_counts(algebra, terms);
-        return Ok(product.expect("tableaux are counted, and so not negative"));
+    if algebra.cartan_type().family() != Family::A {
+        return by_reflection(algebra, frame, large, small, limits);
     }
+    let budget = tableau_budget(frame, small);
+    if let Some(product) = by_tableaux::<L>(large, small, budget, limits)? {
+        return Ok(product);
+    }
+    // Where there are too many weights, there may still be few tableaux.
+    let reflected = by_reflection(algebra, frame, large, small, limits);
+    match reflected {
+        Err(Error::BeyondLimit { .. }) => {
+            let tableaux = by_tableaux::<L>(large, small, limits.weights(), limits)?;
+            tableaux.map_or(reflected, Ok)
+        }
+        done => done,
+    }
+}
+
+fn by_reflection<L: Lanes>(
+    algebra: SimpleAlgebra,
+    frame: &Frame<L>,
+    large: &Irrep,
+    small: &Irrep,
+    limits: &Limits,
+) -> Result<Decomposition, Error> {
     Ok(in_width!(Counts => {
         match factor::<L, Counts>(frame, small, limits)? {
             None => None,
@@ -246,34 +265,51 @@ fn product_of_two<L: Lanes>(
                 let sum = [(highest_weight::<L>(large), Counts::of(1))];
                 let terms = klimyk::times(frame, &sum, &factor, 1, limits)?;
                 terms.and_then(|terms| {
-                    let terms = klimyk::unshifted(frame, terms);
-                    Decomposition::from_counts(algebra, terms)
+                    Decomposition::from_counts(algebra, klimyk::unshifted(frame, &terms))
                 })
             }
         }
     }))
 }
 
-/// The product of two irreps of SU(N) by Young tableaux, where these are fewer than the weights of
-/// the smaller irrep are estimated to be; `None` for other algebras.
-fn by_young_diagrams<L: Lanes>(large: &Irrep, small: &Irrep) -> Option<LaneTable<L, u64>> {
-    let algebra = large.algebra();
-    if algebra.cartan_type().family() != Family::A {
-        return None;
-    }
-    let budget = if algebra.rank() == 1 {
-        // Each term has one tableau.
-        u64::MAX
-    } else {
-        tableau_budget(small)
-    };
+/// The product of two irreps of SU(N) by Young tableaux; `None` where it takes more steps.
+fn by_tableaux<L: Lanes>(
+    large: &Irrep,
+    small: &Irrep,
+    steps: u64,
+    limits: &Limits,
+) -> Result<Option<Decomposition>, Error> {
     let rows = littlewood_richardson::rows;
-    littlewood_richardson::product(&rows(large.labels()), &rows(small.labels()), budget)
+    let budget = Budget {
+        steps,
+        terms: limits.terms(),
+    };
+    match littlewood_richardson::product::<L>(&rows(large.labels()), &rows(small.labels()), budget)
+    {
+        Err(Stopped::Budget) => Ok(None),
+        Err(Stopped::Terms) => {
+            // As many terms as weights, and those as many as the dimension, at most.
+            let weights = large.dimension().min(small.dimension());
+            Err(limits.too_many_terms(weights))
+        }
+        Ok(terms) => {
+            let terms = terms.collect(|weight, &n| Some((weight.clone(), i128::from(n))));
+            Ok(Decomposition::from_counts(large.algebra(), terms))
+        }
+    }
 }
 
-/// Steps that tableaux may take: a step costs about half of a reflection, and the weights are at
-/// least as many as there are in the highest orbit.
-fn tableau_budget(small: &Irrep) -> u64 {
-    let orbit = crate::dimension::orbit_size(small.algebra().cartan_type(), small.labels());
-    u64::try_from(orbit / BigUint::from(4u32)).unwrap_or(u64::MAX)
+/// Steps that tableaux may take before reflection is tried. There are at least as many weights as
+/// in the highest orbit, and a step costs about as much as a weight; irreps with few tableaux,
+/// such as symmetric tensors, need about as many steps as they have boxes and rows. What is spent
+/// in vain is a small part of what reflection takes.
+fn tableau_budget<L: Lanes>(frame: &Frame<L>, small: &Irrep) -> u64 {
+    let highest = highest_weight(small);
+    if frame.rank() == 1 {
+        // Each term has one tableau.
+        return u64::MAX;
+    }
+    let orbit = orbit_size(small.algebra(), frame, &highest).unwrap_or(u64::MAX);
+    let boxes = frame.level(&highest).unsigned_abs();
+    (orbit / 8).max(boxes.saturating_mul(frame.rank() as u64 / 4))
 }

@@ -7,6 +7,7 @@ use crate::decomposition::highest_weight;
 use crate::dominant_weights::DominantWeights;
 use crate::frame::{Frame, label_bound, largest_label};
 use crate::lanes::{Bytes8, Bytes16, Lanes, Shorts8, Wide, on_lanes};
+use crate::littlewood_richardson::Budget;
 use crate::multiplicities::{RootSum, recursion};
 use crate::{Decomposition, Irrep, Limits, SimpleAlgebra, klimyk, littlewood_richardson};
 
@@ -46,7 +47,7 @@ fn by_klimyk<L: Lanes>(frame: &Frame<L>, large: &Irrep, small: &Irrep) -> Decomp
         let sum = [(highest_weight::<L>(large), Counts::from(1u8))];
         let terms = klimyk::times(frame, &sum, &factor.unwrap(), 1, &limits).unwrap();
         terms.and_then(|terms| {
-            Decomposition::from_counts(large.algebra(), klimyk::unshifted(frame, terms))
+            Decomposition::from_counts(large.algebra(), klimyk::unshifted(frame, &terms))
         })
     })
 }
@@ -90,25 +91,23 @@ proptest! {
         on_lanes!(of, bound, |held| {
             let reflected = by_klimyk(&held, &left, &right);
             for (base, added) in [(&left, &right), (&right, &left)] {
-                let rows = littlewood_richardson::rows;
-                let product =
-                    littlewood_richardson::product(&rows(base.labels()), &rows(added.labels()), u64::MAX);
-                let entries = product.unwrap().into_entries().map(|(w, n)| (w, i128::from(n)));
-                let fits = |_: &crate::frame::Held<_>| ();
-                fits(&held);
-                let by_tableaux = from_same_lanes(&held, left.algebra(), entries);
-                prop_assert_eq!(&reflected, &by_tableaux);
+                prop_assert_eq!(&reflected, &by_tableaux(&held, base, added));
             }
         });
     }
 }
 
-fn from_same_lanes<L: Lanes>(
-    _frame: &Frame<L>,
-    algebra: SimpleAlgebra,
-    entries: impl Iterator<Item = (L, i128)>,
-) -> Decomposition {
-    Decomposition::from_counts(algebra, entries).unwrap()
+fn by_tableaux<L: Lanes>(_frame: &Frame<L>, base: &Irrep, added: &Irrep) -> Decomposition {
+    let rows = littlewood_richardson::rows;
+    let budget = Budget {
+        steps: u64::MAX,
+        terms: usize::MAX,
+    };
+    let product =
+        littlewood_richardson::product::<L>(&rows(base.labels()), &rows(added.labels()), budget);
+    let terms = product.unwrap().into_entries();
+    let terms = terms.map(|(weight, n)| (weight, i128::from(n))).collect();
+    Decomposition::from_counts(base.algebra(), terms).unwrap()
 }
 
 /// Beyond rank 8 and with labels that fit no lane: SU(N) by tableaux, SO(N) by dimension.
@@ -171,6 +170,35 @@ fn orders_two_ways() {
             if let Some(held) = &held {
                 assert_eq!(size, held.orbit_size(&highest_weight(&irrep)).into());
             }
+        }
+    }
+}
+
+/// The sum of positive coroots, and which irreps have one orbit of weights: that of the root
+/// system, for every type up to rank 9.
+#[test]
+fn heights_and_minuscule_weights() {
+    for algebra in SimpleAlgebra::up_to_rank(9) {
+        let wide = Wide::frame(algebra.cartan_type());
+        for node in 0..algebra.rank() {
+            let fundamental = Irrep::from_fn(algebra, |i| u32::from(i == node));
+            let weight = highest_weight::<Wide>(&fundamental);
+            let roots = algebra.root_system();
+            let coroots = roots
+                .positive_roots()
+                .map(|root| i64::from(root.coroot()[node]));
+            assert_eq!(
+                wide.level(&weight),
+                coroots.sum::<i64>(),
+                "{algebra} node {node}"
+            );
+            let one_orbit =
+                wide.orbit_size(&weight) == u64::try_from(fundamental.dimension()).unwrap();
+            assert_eq!(
+                wide.is_minuscule(&weight),
+                one_orbit,
+                "{algebra} node {node}"
+            );
         }
     }
 }

@@ -60,10 +60,9 @@ impl SimpleAlgebra {
 
 impl Weight {
     pub(crate) fn from_lanes<L: Lanes>(algebra: SimpleAlgebra, weight: &L) -> Self {
-        let labels = (0..algebra.rank()).map(|node| weight.label(node));
         Self {
             algebra,
-            labels: labels.collect(),
+            labels: weight.labels(algebra.rank()),
         }
     }
 
@@ -165,7 +164,22 @@ pub(crate) fn lane_orbit<L: Lanes>(
 ) -> impl Iterator<Item = L> + Send + 'static {
     let mut walk = OrbitWalk::new();
     walk.restart(dominant);
-    std::iter::from_fn(move || walk.next_weight(&held))
+    let mut second = None;
+    std::iter::from_fn(move || {
+        if let Some(weight) = second.take() {
+            return Some(weight);
+        }
+        let mut first = None;
+        walk.step(&held, |weight| {
+            let place = if first.is_none() {
+                &mut first
+            } else {
+                &mut second
+            };
+            *place = Some(weight.clone());
+        });
+        first
+    })
 }
 
 impl fmt::Display for Weight {

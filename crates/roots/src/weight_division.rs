@@ -11,7 +11,7 @@ use crate::{Character, Decomposition, Error, Irrep, Limits};
 /// The product of two irreps by their characters.
 ///
 /// # Errors
-/// [`Error::MixedAlgebras`], and [`Error::BeyondLimit`] or [`Error::TooMany`] beyond `limits`.
+/// [`Error::MixedAlgebras`], and [`Error::BeyondLimit`] beyond `limits`.
 /// # Cost
 /// One reflection per dominant weight of the larger and weight of the smaller irrep, then the
 /// dominant weights of every irrep in the product.

@@ -15,7 +15,7 @@ impl Irrep {
     /// it lies below.
     ///
     /// # Errors
-    /// [`Error::TooMany`] where there are more than the limit of [`Limits`].
+    /// [`Error::BeyondLimit`] where there are more than the limit of [`Limits`].
     /// # Cost
     /// For each dominant weight, one look-up per orbit of roots under the stabiliser of the weight
     /// and step along it.
