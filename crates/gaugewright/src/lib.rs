@@ -7,6 +7,7 @@
 //! - [`anomaly`]: anomaly conditions and verdicts;
 //! - [`running`]: beta coefficients;
 //! - [`answer`]: what each command answers, as a value, as JSON and as a [`report::Page`];
+//! - [`bibliography`]: the works that doc comments cite by key;
 //! - [`request`]: what a command asks, from a terminal or a line of JSON.
 //!
 //! ```
@@ -23,6 +24,7 @@ pub use roots;
 pub use running;
 
 pub mod answer;
+pub mod bibliography;
 mod failure;
 pub mod report;
 pub mod request;

@@ -166,8 +166,10 @@ impl Request {
                 Box::new(CatalogAnswer::new(algebra, bound, limit, numbering)?)
             }
             Self::Anomalies { model } => Box::new(AnomaliesAnswer::new(&model.read()?)?),
-            Self::Audit { model: None } => Box::new(AuditAnswer::new(model::demo())?),
-            Self::Audit { model: Some(model) } => Box::new(AuditAnswer::new(model.read()?)?),
+            Self::Audit { model: None } => Box::new(AuditAnswer::new(model::demo(), numbering)?),
+            Self::Audit { model: Some(model) } => {
+                Box::new(AuditAnswer::new(model.read()?, numbering)?)
+            }
         })
     }
 }

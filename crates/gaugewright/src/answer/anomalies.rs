@@ -83,6 +83,12 @@ impl AnomaliesAnswer {
         })
     }
 
+    /// Whether the symmetries can have no anomaly at all.
+    #[must_use]
+    pub fn is_empty(&self) -> bool {
+        self.conditions.is_empty()
+    }
+
     /// Whether every condition that must hold does.
     #[must_use]
     pub const fn is_consistent(&self) -> bool {
@@ -99,7 +105,10 @@ impl AnomaliesAnswer {
             .count();
         let violated: Vec<&Condition> = self.report.violated().collect();
         match (required, violated.len()) {
-            (0, _) => page.verdict(Verdict::Consistent, "no anomaly condition applies"),
+            (0, _) => page.verdict(
+                Verdict::Consistent,
+                "these groups have no anomaly, whatever the multiplets",
+            ),
             (1, 0) => page.verdict(Verdict::Consistent, "the one anomaly condition holds"),
             (_, 0) => page.verdict(
                 Verdict::Consistent,
@@ -251,6 +260,9 @@ impl Answer for AnomaliesAnswer {
     fn page(&self) -> Page {
         let mut page = Page::titled(format!("Anomalies of: {}", self.title));
         self.tell_verdict(&mut page);
+        if self.is_empty() {
+            return page;
+        }
         page.section("Conditions");
         page.table(self.table());
         page.section("What each multiplet adds");

@@ -5,6 +5,7 @@ use std::collections::BTreeMap;
 use model::{Model, Spectrum};
 use num_bigint::BigInt;
 use num_rational::BigRational;
+use roots::Numbering;
 use running::BetaCoefficient;
 use serde::Serialize;
 
@@ -18,6 +19,7 @@ use crate::report::{Exact, Page, to_json_line};
 #[derive(Clone, Debug, Serialize)]
 pub struct AuditAnswer {
     consistent: bool,
+    numbering: String,
     model: ModelFacts,
     symmetry: Vec<SymmetryFacts>,
     multiplets: Vec<MultipletAnswer>,
@@ -30,6 +32,8 @@ pub struct AuditAnswer {
     embeddings: Option<()>,
     /// Not worked out by this version.
     couplings: Option<()>,
+    #[serde(skip)]
+    order: Numbering,
     #[serde(skip)]
     of: Model,
     #[serde(skip)]
@@ -79,17 +83,18 @@ pub(super) fn unified_normalisation() -> BigRational {
 }
 
 impl AuditAnswer {
-    /// Everything about `model`.
+    /// Everything about `model`, labels of irreps in `order`.
     ///
     /// # Errors
     /// [`Failure::UnknownCharge`] where a charge is written `"?"`.
-    pub fn new(model: Model) -> Result<Self, Failure> {
+    pub fn new(model: Model, order: Numbering) -> Result<Self, Failure> {
         let anomalies = AnomaliesAnswer::new(&model)?;
         let coefficients = running::one_loop(&model);
         let standings = Standing::all(model.spectrum());
         let states = model.degrees_of_freedom();
         Ok(Self {
             consistent: anomalies.is_consistent(),
+            numbering: order.to_string(),
             model: ModelFacts {
                 title: model.title().to_owned(),
                 supersymmetric: model.is_supersymmetric(),
@@ -97,7 +102,7 @@ impl AuditAnswer {
                 notes: model.notes().map(str::to_owned),
             },
             symmetry: symmetry_facts(model.spectrum()),
-            multiplets: MultipletAnswer::all(&model, &standings),
+            multiplets: MultipletAnswer::all(&model, &standings, order),
             degrees_of_freedom: States {
                 fermionic: states.fermionic,
                 bosonic: states.bosonic,
@@ -112,12 +117,17 @@ impl AuditAnswer {
             couplings: None,
             standings,
             coefficients,
+            order,
             of: model,
         })
     }
 
     pub(super) const fn model(&self) -> &Model {
         &self.of
+    }
+
+    pub(super) const fn order(&self) -> Numbering {
+        self.order
     }
 
     pub(super) const fn anomalies(&self) -> &AnomaliesAnswer {

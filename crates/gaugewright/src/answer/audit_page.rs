@@ -2,9 +2,10 @@
 
 use model::{Field, Group, Model, Multiplet, Transformation};
 use num_traits::Zero;
-use roots::NameBook;
+use roots::{NameBook, Numbering};
 
 use super::audit::{AuditAnswer, unified_normalisation};
+use super::irrep::name_phrase;
 use super::multiplets::Standing;
 use crate::report::{Align, Page, Phrase, Table};
 
@@ -12,8 +13,10 @@ pub(super) fn lay_out(audit: &AuditAnswer) -> Page {
     let model = audit.model();
     let mut page = Page::titled(model.title());
     audit.anomalies().tell_verdict(&mut page);
-    page.section("Anomalies");
-    page.table(audit.anomalies().table());
+    if !audit.anomalies().is_empty() {
+        page.section("Anomalies");
+        page.table(audit.anomalies().table());
+    }
     audit.anomalies().tell_gauginos(&mut page);
     symmetry(audit, &mut page);
     multiplets(audit, &mut page);
@@ -39,7 +42,7 @@ fn symmetry(audit: &AuditAnswer, page: &mut Page) {
         facts.push((symmetry.label().into(), group.then(kind)));
     }
     if let Some(center) = audit.center() {
-        facts.push(("acts on nothing".into(), Phrase::from(center_words(center))));
+        facts.push(("acts trivially".into(), Phrase::from(center_words(center))));
     }
     let states = model.degrees_of_freedom();
     let words = format!("{} fermionic, {} bosonic", states.fermionic, states.bosonic);
@@ -83,7 +86,7 @@ fn multiplets(audit: &AuditAnswer, page: &mut Page) {
         columns.push(("electric charge".into(), Align::Left));
     }
     let mut table = Table::new(columns);
-    let mut names = Names::of(model);
+    let mut names = Names::of(model, audit.order());
     for (multiplet, answer) in model.spectrum().multiplets().iter().zip(audit.multiplets()) {
         let mut row = vec![
             Phrase::from(multiplet.label()),
@@ -116,28 +119,37 @@ const fn short_field(field: Field) -> &'static str {
 }
 
 /// One name book for each symmetry.
-struct Names(Vec<Option<NameBook>>);
+struct Names {
+    books: Vec<Option<NameBook>>,
+    order: Numbering,
+}
 
 impl Names {
-    fn of(model: &Model) -> Self {
+    fn of(model: &Model, order: Numbering) -> Self {
         let groups = model
             .spectrum()
             .symmetries()
             .iter()
             .map(|one| one.group().simple());
-        Self(groups.map(|algebra| algebra.map(NameBook::new)).collect())
+        Self {
+            books: groups.map(|algebra| algebra.map(NameBook::new)).collect(),
+            order,
+        }
     }
 
     /// The irrep with its labels, or the charge; singlets without labels.
     fn under(&mut self, multiplet: &Multiplet, place: usize) -> Phrase {
-        match (multiplet.transformation(place), &mut self.0[place]) {
+        match (multiplet.transformation(place), &mut self.books[place]) {
             (Transformation::Irrep(irrep), Some(_)) if irrep.is_singlet() => "1".into(),
-            (Transformation::Irrep(irrep), Some(names)) => match names.name(irrep) {
-                roots::IrrepName::Labels(labels) => Phrase::labels(labels),
-                name @ roots::IrrepName::Dimension { .. } => Phrase::from(name)
-                    .then(" ")
-                    .then(Phrase::labels(irrep.bracketed())),
-            },
+            (Transformation::Irrep(irrep), Some(names)) => {
+                let name = name_phrase(names, irrep, self.order);
+                let labels = Phrase::labels(irrep.bracketed_in(self.order));
+                if name == labels {
+                    labels
+                } else {
+                    name.then(" ").then(labels)
+                }
+            }
             (Transformation::Charge(charge), _) => charge.clone().into(),
             (other, _) => other.to_string().into(),
         }

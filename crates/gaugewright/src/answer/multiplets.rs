@@ -3,9 +3,10 @@
 use std::collections::BTreeMap;
 
 use model::{FermionClass, Model, Multiplet, Spectrum};
-use roots::Reality;
+use roots::{Numbering, Reality};
 use serde::Serialize;
 
+use super::irrep::labels as labels_in;
 use crate::report::Exact;
 
 /// One multiplet.
@@ -41,18 +42,23 @@ pub(super) struct ChargeOfStates {
 
 impl MultipletAnswer {
     /// Every multiplet of `model`.
-    pub(super) fn all(model: &Model, standings: &[Standing]) -> Vec<Self> {
+    pub(super) fn all(model: &Model, standings: &[Standing], order: Numbering) -> Vec<Self> {
         let multiplets = model.spectrum().multiplets().iter().enumerate();
         multiplets
-            .map(|(place, multiplet)| Self::new(model, multiplet, standings.get(place)))
+            .map(|(place, multiplet)| Self::new(model, multiplet, standings.get(place), order))
             .collect()
     }
 
-    fn new(model: &Model, multiplet: &Multiplet, standing: Option<&Standing>) -> Self {
+    fn new(
+        model: &Model,
+        multiplet: &Multiplet,
+        standing: Option<&Standing>,
+        order: Numbering,
+    ) -> Self {
         let symmetries = || model.spectrum().symmetries().iter().enumerate();
         let labels = symmetries().filter_map(|(place, symmetry)| {
             let irrep = multiplet.irrep(place)?;
-            Some((symmetry.label().to_owned(), irrep.labels().to_vec()))
+            Some((symmetry.label().to_owned(), labels_in(irrep, order)))
         });
         let transforms = symmetries().map(|(place, symmetry)| {
             (
