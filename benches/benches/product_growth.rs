@@ -102,12 +102,8 @@ fn million_products() {
     let su5: SimpleAlgebra = "SU(5)".parse().expect("SU(5)");
     let bound = CatalogBound::Dimension(100u32.into());
     let irreps = su5.irreps_within(&bound, 1000).expect("a short list");
-    let pair = |i: usize| {
-        (
-            &irreps[i * 7 % irreps.len()],
-            &irreps[i * 13 / 5 % irreps.len()],
-        )
-    };
+    let count = irreps.len();
+    let pair = |i: usize| (&irreps[i % count], &irreps[i / count % count]);
     let mut cache = ProductCache::new().with_limits(Limits::default());
     let start = Instant::now();
     let mut terms = 0;
