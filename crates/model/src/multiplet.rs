@@ -155,6 +155,7 @@ impl Multiplet {
     }
 
     /// Whether it counts in anomalies.
+    #[inline]
     #[must_use]
     pub const fn has_fermions(&self) -> bool {
         self.field.has_fermions()
@@ -162,6 +163,7 @@ impl Multiplet {
 
     /// -1 for a right-handed fermion, 1 otherwise. In the left-handed view charges and cubic
     /// indices take this sign; dimensions and Dynkin indices do not change.
+    #[inline]
     #[must_use]
     pub const fn left_handed_sign(&self) -> i64 {
         self.field.left_handed_sign()
@@ -174,6 +176,7 @@ impl Multiplet {
     }
 
     /// Dimension times copies.
+    #[inline]
     #[must_use]
     pub const fn states(&self) -> u64 {
         self.states
@@ -209,6 +212,7 @@ impl Multiplet {
     }
 
     /// Its charge under a Z(N), from 0 to N - 1.
+    #[inline]
     #[must_use]
     pub fn discrete_charge(&self, symmetry: usize) -> Option<u32> {
         match self.transformation(symmetry) {
@@ -243,12 +247,14 @@ impl Multiplet {
 
     /// The Dynkin index under one symmetry of all that is in the multiplet: times the dimensions
     /// under the others, and the copies.
+    #[inline]
     #[must_use]
     pub fn total_dynkin_index_under(&self, symmetry: usize) -> u64 {
         self.under[symmetry].total_dynkin_index
     }
 
     /// The cubic index under one symmetry of all that is in the multiplet, as written.
+    #[inline]
     #[must_use]
     pub fn total_cubic_index_under(&self, symmetry: usize) -> i64 {
         self.under[symmetry].total_cubic_index
@@ -258,6 +264,7 @@ impl Multiplet {
     /// written, not in the left-handed view. `None` where the charge is unknown, the symmetry no
     /// U(1), or some charge of the spectrum under it does not fit; [`charge`](Self::charge) is
     /// exact always.
+    #[inline]
     #[must_use]
     pub fn scaled_charge(&self, symmetry: usize) -> Option<i64> {
         self.under[symmetry].scaled_charge
