@@ -13,8 +13,8 @@ const RUNS: usize = 40;
 fn main() {
     let binary = build();
     println!(
-        "{:<48} {:>8} {:>9} {:>9}",
-        "process", "min/ms", "median/ms", "target/ms"
+        "{:<50} {:>9} {:>9} {:>7}",
+        "process", "least", "median", "target"
     );
     report(
         "/bin/true",
@@ -82,11 +82,11 @@ fn report(name: &str, target: Option<u64>, call: impl Fn() -> Output, check: imp
         check(&String::from_utf8(output.stdout).expect("UTF-8"));
     }
     times.sort_unstable();
-    let milliseconds = |time: Duration| benches::clock::microseconds(time) / 1e3;
+    let time = |time: Duration| format!("{time:.2?}");
     println!(
-        "{name:<48} {:>8.2} {:>9.2} {:>9}",
-        milliseconds(times[0]),
-        milliseconds(times[RUNS / 2]),
-        target.map_or_else(String::new, |target| target.to_string()),
+        "{name:<50} {:>9} {:>9} {:>7}",
+        time(times[0]),
+        time(times[RUNS / 2]),
+        target.map_or_else(String::new, |target| format!("{target}ms")),
     );
 }

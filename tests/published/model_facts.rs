@@ -1,6 +1,7 @@
 //! Facts of the example models besides anomalies: what of the centre acts trivially, degrees of
 //! freedom, which fermions may have masses.
 
+use gaugewright::answer::{Answer, AuditAnswer};
 use model::{FermionClass, Field, Model, Multiplet, Spectrum};
 
 use super::anomalies::{example, examples, gauged, left};
