@@ -1,5 +1,7 @@
 //! Small things that several checks need.
 
+use std::io::Write;
+
 use num_bigint::BigUint;
 use outside_checks::slow::SlowAlgebra;
 use roots::{Irrep, SimpleAlgebra};
@@ -37,6 +39,10 @@ pub(crate) fn seed() -> u64 {
         Ok(written) => written.parse().expect("GAUGEWRIGHT_SEED is a whole number"),
         Err(_) => fastrand::u64(..),
     };
-    println!("seed: GAUGEWRIGHT_SEED={seed}");
+    // Not by `println!`, which the test runner would swallow.
+    let line = format!("seed: GAUGEWRIGHT_SEED={seed} makes these choices again\n");
+    std::io::stderr()
+        .write_all(line.as_bytes())
+        .expect("standard error is open");
     seed
 }

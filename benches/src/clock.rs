@@ -30,6 +30,7 @@ fn batch<T>(call: &mut impl FnMut() -> T, calls: u32) -> Duration {
 
 /// Microseconds, for print.
 #[must_use]
+#[allow(clippy::float_arithmetic)]
 pub fn microseconds(time: Duration) -> f64 {
     time.as_secs_f64() * 1e6
 }

@@ -8,4 +8,5 @@
 
 pub mod case;
 pub mod clock;
+pub mod families;
 pub mod peer;

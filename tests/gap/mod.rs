@@ -1,4 +1,5 @@
 //! GAP, a general-purpose algebra system, asked live.
 
 mod answers;
+mod products;
 mod root_systems;

@@ -115,7 +115,7 @@ fn check_adjoint(algebra: SimpleAlgebra) {
     let highest = roots.highest_root().coefficients();
     for (j, &label) in adjoint.labels().iter().enumerate() {
         let column = (0..algebra.rank()).map(|i| i64::from(highest[i]) * i64::from(matrix[(i, j)]));
-        assert_eq!(column.sum::<i64>(), label.into(), "{algebra}, node {j}");
+        assert_eq!(column.sum::<i64>(), i64::from(label), "{algebra}, node {j}");
     }
     let same_size = roots::NameBook::new(algebra)
         .of_dimension(&adjoint.dimension())

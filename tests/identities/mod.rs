@@ -1,5 +1,6 @@
 //! What must be true of every algebra.
 
+mod anomalies;
 mod catalogues;
 mod choices;
 mod index_and_casimir;

@@ -3,7 +3,10 @@
 use model::{Group, Spectrum};
 use roots::{Family, SimpleAlgebra};
 
-/// One anomaly, by the places of its symmetries in the spectrum.
+/// One anomaly, by the places of its symmetries in the spectrum, as [`Anomaly::all`] lists them.
+///
+/// What takes an anomaly together with a spectrum panics where the spectrum has no symmetry of
+/// such a place; where there is one of another group, the answer means nothing.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
 pub enum Anomaly {
     /// `G^3` of SU(N) from N = 3 on, or SO(6).
@@ -67,7 +70,9 @@ impl Anomaly {
     /// # Source
     /// `G^3`, `G^2 U(1)` and `U(1)^3`: [Bouchiat-Iliopoulos-Meyer 1972], [Gross-Jackiw 1972],
     /// [Georgi-Glashow 1972]; with gravity: [Delbourgo-Salam 1972],
-    /// [Alvarez-Gaume-Witten 1984]; parity: [Witten 1982]; Z(N): [Ibanez-Ross 1991].
+    /// [Alvarez-Gaume-Witten 1984]; parity: [Witten 1982]; Z(N): [Ibanez-Ross 1991], of which only
+    /// the conditions linear in the Z(N) charge are here: those on its cube and on its products
+    /// with U(1)s depend on what is heavy ([Banks-Dine 1992]).
     pub fn all(spectrum: &Spectrum) -> impl Iterator<Item = Self> + '_ {
         let cubic = simple(spectrum).filter(|&(_, algebra)| has_cubic_index(algebra));
         let mixed = simple(spectrum).flat_map(move |(gauge, _)| {

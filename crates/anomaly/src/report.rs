@@ -22,7 +22,7 @@ impl Report {
         })
     }
 
-    /// The conditions: cubic, mixed, gravitational, global, discrete.
+    /// The conditions, in the order of [`Anomaly::all`].
     #[must_use]
     pub fn conditions(&self) -> &[Condition] {
         &self.conditions

@@ -3,20 +3,29 @@
 use model::Multiplet;
 use num_bigint::BigInt;
 use num_rational::BigRational;
-use num_traits::Zero;
+use num_traits::{CheckedMul, Zero};
 
 use crate::Anomaly;
 
 impl Anomaly {
     /// The share of `multiplet`, with charges times the spectrum's common denominators; `None`
-    /// where a charge is unknown or the share is beyond 128 bits.
-    pub(crate) fn small_share(&self, multiplet: &Multiplet) -> Option<i128> {
+    /// where a charge is unknown or the share too large for `T`.
+    #[inline]
+    pub(crate) fn small_share<T: From<i64> + CheckedMul>(
+        &self,
+        multiplet: &Multiplet,
+    ) -> Option<T> {
         if !multiplet.has_fermions() {
-            return Some(0);
+            return Some(T::from(0));
         }
-        let mut share = self.whole_share(multiplet);
+        let whole = self.whole_share(multiplet);
+        if whole == 0 {
+            return Some(T::from(0));
+        }
+        let discrete = i64::from(self.discrete_charge(multiplet));
+        let mut share = T::from(whole).checked_mul(&T::from(discrete))?;
         for &charge in self.charges() {
-            share = share.checked_mul(multiplet.scaled_charge(charge)?.into())?;
+            share = share.checked_mul(&T::from(multiplet.scaled_charge(charge)?))?;
         }
         Some(share)
     }
@@ -26,47 +35,49 @@ impl Anomaly {
         if !multiplet.has_fermions() {
             return Ok(BigRational::zero());
         }
-        let mut share = BigRational::from(BigInt::from(self.whole_share(multiplet)));
+        let whole = self.whole_share(multiplet);
+        if whole == 0 {
+            return Ok(BigRational::zero());
+        }
+        let whole = BigInt::from(whole) * self.discrete_charge(multiplet);
+        let mut share = BigRational::from(whole);
         for &place in self.charges() {
             share *= multiplet.charge(place).ok_or(place)?;
         }
         Ok(share)
     }
 
-    /// Everything but the charges under U(1)s. A multiplet keeps its indices and dimension, with
-    /// copies, below 2^63, and a charge under Z(N) is below 2^32: the product is far inside 128
-    /// bits.
-    fn whole_share(&self, multiplet: &Multiplet) -> i128 {
+    /// Everything but the charges: an index or the number of states, in the left-handed view. A
+    /// multiplet keeps them, all copies counted, below 2^63.
+    #[inline]
+    fn whole_share(&self, multiplet: &Multiplet) -> i64 {
         // One charge, three charges or a cubic index are odd under conjugation, a parity is not.
-        let sign = i128::from(multiplet.left_handed_sign());
-        let charge = |place| i128::from(multiplet.discrete_charge(place).unwrap_or(0));
+        let sign = multiplet.left_handed_sign();
+        let index = |gauge| multiplet.total_dynkin_index_under(gauge).cast_signed();
         match *self {
-            Self::GaugeCubed(gauge) => {
-                let cubic = i128::from(multiplet.cubic_index_under(gauge));
-                sign * cubic * others(multiplet, gauge)
+            Self::GaugeCubed(gauge) => sign * multiplet.total_cubic_index_under(gauge),
+            Self::GaugeSquaredCharge { gauge, .. } | Self::GaugeSquaredDiscrete { gauge, .. } => {
+                sign * index(gauge)
             }
-            Self::GaugeSquaredCharge { gauge, .. } => sign * index(multiplet, gauge),
-            Self::Charges(_) | Self::GravityCharge(_) => sign * states(multiplet),
-            Self::Parity(gauge) => index(multiplet, gauge),
-            Self::GaugeSquaredDiscrete { gauge, discrete } => {
-                sign * index(multiplet, gauge) * charge(discrete)
+            Self::Charges(_) | Self::GravityCharge(_) | Self::GravityDiscrete(_) => {
+                sign * multiplet.states().cast_signed()
             }
-            Self::GravityDiscrete(discrete) => sign * states(multiplet) * charge(discrete),
+            Self::Parity(gauge) => index(gauge),
         }
     }
-}
 
-/// Dimension times copies.
-fn states(multiplet: &Multiplet) -> i128 {
-    i128::from(multiplet.dimension()) * i128::from(multiplet.copies())
-}
-
-/// Dimension under all symmetries but one, times copies.
-fn others(multiplet: &Multiplet, gauge: usize) -> i128 {
-    states(multiplet) / i128::from(multiplet.dimension_under(gauge))
-}
-
-/// Dynkin index under `gauge` of everything in the multiplet.
-fn index(multiplet: &Multiplet, gauge: usize) -> i128 {
-    i128::from(multiplet.dynkin_index_under(gauge)) * others(multiplet, gauge)
+    /// The charge under the Z(N) that takes part; 1 where none does.
+    #[inline]
+    fn discrete_charge(&self, multiplet: &Multiplet) -> u32 {
+        match *self {
+            Self::GaugeSquaredDiscrete { discrete, .. } | Self::GravityDiscrete(discrete) => {
+                multiplet.discrete_charge(discrete).unwrap_or(0)
+            }
+            Self::GaugeCubed(_)
+            | Self::GaugeSquaredCharge { .. }
+            | Self::Charges(_)
+            | Self::GravityCharge(_)
+            | Self::Parity(_) => 1,
+        }
+    }
 }

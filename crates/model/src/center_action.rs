@@ -7,12 +7,15 @@ use roots::{Center, Congruency, FiniteAbelian, rows_without};
 use crate::{Group, Multiplet, Spectrum};
 
 impl Spectrum {
-    /// The subgroup of the gauge group that acts trivially on every multiplet, scalars included,
-    /// where each simple factor is simply connected and the U(1)s are just large enough for the
-    /// charges that occur. It is Z6 for the Standard Model. `None` while a charge is unknown, and
-    /// for charges without a common denominator within 63 bits.
+    /// The subgroup of the gauge group that acts trivially on every multiplet, scalars included.
+    /// Each simple factor is taken simply connected, and the U(1)s together as the torus that acts
+    /// effectively: its characters are the sums of the charges that occur, so that the answer does
+    /// not depend on which combinations of the U(1)s the charges are written in, and a combination
+    /// that nothing is charged under is left out. It is Z6 for the Standard Model.
     ///
-    /// The group that acts is the quotient by it. Z(N) symmetries and global ones take no part.
+    /// `None` while a charge is unknown, and for charges without a common denominator within 63
+    /// bits. The group that acts is the quotient by it. Z(N) symmetries and global ones take no
+    /// part.
     ///
     /// # Source
     /// [Tong 2017]; computed as the classes under the centre modulo those that neutral

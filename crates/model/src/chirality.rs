@@ -39,6 +39,18 @@ impl FermionClass {
         &self.conjugate_members
     }
 
+    /// How many copies there are in the irrep.
+    #[must_use]
+    pub const fn copies(&self) -> u64 {
+        self.copies
+    }
+
+    /// How many copies there are in the conjugate of a complex irrep.
+    #[must_use]
+    pub const fn conjugate_copies(&self) -> u64 {
+        self.conjugate_copies
+    }
+
     /// How many copies may have masses among themselves: pairs of opposite copies of a complex
     /// irrep count once, pairs of a pseudoreal one too, and each copy of a real irrep.
     #[must_use]

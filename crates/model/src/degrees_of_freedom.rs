@@ -33,7 +33,7 @@ impl Model {
             .filter(|one| one.is_gauged())
         {
             let generators: u128 = match symmetry.group() {
-                Group::Simple(algebra) => algebra.dimension().try_into().unwrap_or(u128::MAX),
+                Group::Simple(algebra) => algebra.dimension() as u128,
                 Group::U1 => 1,
                 Group::Discrete(_) => 0,
             };
@@ -43,7 +43,7 @@ impl Model {
             }
         }
         for multiplet in self.spectrum().multiplets() {
-            let components = u128::from(multiplet.dimension()) * u128::from(multiplet.copies());
+            let components = u128::from(multiplet.states());
             match multiplet.field() {
                 Field::LeftHandedFermion | Field::RightHandedFermion => {
                     states.fermionic += 2 * components;

@@ -28,6 +28,8 @@ pub struct Multiplet {
     family_dependent: bool,
     mass_gev: Option<BigRational>,
     dimension: u64,
+    /// The dimension times the copies.
+    states: u64,
     /// One per symmetry of the spectrum.
     under: Vec<Under>,
 }
@@ -37,6 +39,9 @@ pub struct Multiplet {
 struct Under {
     transformation: Transformation,
     numbers: IrrepNumbers,
+    /// Times copies and the dimensions under the other symmetries.
+    total_dynkin_index: u64,
+    total_cubic_index: i64,
     scaled_charge: Option<i64>,
 }
 
@@ -49,6 +54,8 @@ impl Under {
         Ok(Self {
             transformation,
             numbers,
+            total_dynkin_index: 0,
+            total_cubic_index: 0,
             scaled_charge: None,
         })
     }
@@ -77,39 +84,42 @@ impl Multiplet {
             family_dependent: draft.family_dependent,
             mass_gev,
             dimension: 1,
+            states: 1,
             under: under.collect::<Result<_, _>>()?,
         };
-        multiplet.dimension = multiplet
-            .checked_dimension()
+        multiplet
+            .count_states()
             .map_err(|problem| (None, problem))?;
         multiplet
-            .check_indices()
+            .total_indices()
             .map_err(|(i, problem)| (Some(i), problem))?;
         Ok(multiplet)
     }
 
-    fn checked_dimension(&self) -> Result<u64, Problem> {
+    fn count_states(&mut self) -> Result<(), Problem> {
         let dimensions = self.under.iter().map(|under| under.numbers.dimension);
         let product: BigUint = dimensions.map(BigUint::from).product();
-        whole(&(&product * self.copies), "the dimension times the copies")?;
-        whole(&product, "the dimension")
+        self.states = whole(&(&product * self.copies), "the dimension times the copies")?;
+        self.dimension = whole(&product, "the dimension")?;
+        Ok(())
     }
 
     /// Index times copies and the dimensions under the other symmetries, each within 63 bits.
-    fn check_indices(&self) -> Result<(), (usize, Problem)> {
-        for (i, under) in self.under.iter().enumerate() {
-            let others =
-                BigUint::from(self.dimension / under.numbers.dimension * u64::from(self.copies));
-            let indices = [
-                (under.numbers.dynkin_index, "the Dynkin index of all copies"),
-                (
-                    under.numbers.cubic_index.unsigned_abs(),
-                    "the cubic index of all copies",
-                ),
-            ];
-            for (index, quantity) in indices {
-                whole(&(&others * index), quantity).map_err(|problem| (i, problem))?;
-            }
+    fn total_indices(&mut self) -> Result<(), (usize, Problem)> {
+        for (i, under) in self.under.iter_mut().enumerate() {
+            let IrrepNumbers {
+                dimension,
+                dynkin_index,
+                cubic_index,
+            } = under.numbers;
+            let others = BigInt::from(self.states / dimension);
+            let total = |index: BigInt, quantity| {
+                let total = (&others * index).to_i64().filter(|&all| all != i64::MIN);
+                total.ok_or((i, Problem::TooLarge { quantity }))
+            };
+            let dynkin = total(dynkin_index.into(), "the Dynkin index of all copies")?;
+            under.total_dynkin_index = dynkin.unsigned_abs();
+            under.total_cubic_index = total(cubic_index.into(), "the cubic index of all copies")?;
         }
         Ok(())
     }
@@ -145,6 +155,7 @@ impl Multiplet {
     }
 
     /// Whether it counts in anomalies.
+    #[inline]
     #[must_use]
     pub const fn has_fermions(&self) -> bool {
         self.field.has_fermions()
@@ -152,6 +163,7 @@ impl Multiplet {
 
     /// -1 for a right-handed fermion, 1 otherwise. In the left-handed view charges and cubic
     /// indices take this sign; dimensions and Dynkin indices do not change.
+    #[inline]
     #[must_use]
     pub const fn left_handed_sign(&self) -> i64 {
         self.field.left_handed_sign()
@@ -161,6 +173,13 @@ impl Multiplet {
     #[must_use]
     pub const fn dimension(&self) -> u64 {
         self.dimension
+    }
+
+    /// Dimension times copies.
+    #[inline]
+    #[must_use]
+    pub const fn states(&self) -> u64 {
+        self.states
     }
 
     /// What it is under each symmetry, in the spectrum's order.
@@ -193,6 +212,7 @@ impl Multiplet {
     }
 
     /// Its charge under a Z(N), from 0 to N - 1.
+    #[inline]
     #[must_use]
     pub fn discrete_charge(&self, symmetry: usize) -> Option<u32> {
         match self.transformation(symmetry) {
@@ -225,10 +245,26 @@ impl Multiplet {
         self.under[symmetry].numbers.cubic_index
     }
 
+    /// The Dynkin index under one symmetry of all that is in the multiplet: times the dimensions
+    /// under the others, and the copies.
+    #[inline]
+    #[must_use]
+    pub fn total_dynkin_index_under(&self, symmetry: usize) -> u64 {
+        self.under[symmetry].total_dynkin_index
+    }
+
+    /// The cubic index under one symmetry of all that is in the multiplet, as written.
+    #[inline]
+    #[must_use]
+    pub fn total_cubic_index_under(&self, symmetry: usize) -> i64 {
+        self.under[symmetry].total_cubic_index
+    }
+
     /// Its charge times [`Spectrum::charge_denominator`](crate::Spectrum::charge_denominator), as
     /// written, not in the left-handed view. `None` where the charge is unknown, the symmetry no
     /// U(1), or some charge of the spectrum under it does not fit; [`charge`](Self::charge) is
     /// exact always.
+    #[inline]
     #[must_use]
     pub fn scaled_charge(&self, symmetry: usize) -> Option<i64> {
         self.under[symmetry].scaled_charge

@@ -89,18 +89,18 @@ fn contribution(multiplet: &Multiplet, place: usize) -> Option<BigRational> {
         Field::RealScalar => fraction(1, 6),
         Field::ChiralSuperfield => whole(1),
     };
-    let copies = BigRational::from(BigInt::from(multiplet.copies()));
-    Some(weight * copies * trace(multiplet, place)?)
+    Some(weight * trace(multiplet, place)?)
 }
 
-/// T over all components of one copy: half the Dynkin index, or the charge squared.
+/// T over all components and copies: half the Dynkin index, or the charge squared.
 fn trace(multiplet: &Multiplet, place: usize) -> Option<BigRational> {
-    let own = match multiplet.irrep(place) {
-        Some(_) => BigRational::new(multiplet.dynkin_index_under(place).into(), 2.into()),
-        None => multiplet.charge(place)?.pow(2),
-    };
-    let others = multiplet.dimension() / multiplet.dimension_under(place);
-    Some(own * BigInt::from(others))
+    match multiplet.irrep(place) {
+        Some(_) => {
+            let index = BigInt::from(multiplet.total_dynkin_index_under(place));
+            Some(BigRational::new(index, 2.into()))
+        }
+        None => Some(multiplet.charge(place)?.pow(2) * BigInt::from(multiplet.states())),
+    }
 }
 
 fn whole(value: i64) -> BigRational {

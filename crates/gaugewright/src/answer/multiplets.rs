@@ -106,9 +106,9 @@ pub(super) enum Standing {
     None,
     /// No copy may have a mass.
     Chiral,
-    /// Copies pair up with these multiplets.
+    /// Every copy finds a partner in these multiplets.
     VectorLike(Vec<usize>),
-    /// Copies pair up with these multiplets, and some of the class are left over.
+    /// Copies pair up with these multiplets, but there are more copies than partners.
     Partly(Vec<usize>),
     /// Each copy may have a mass by itself.
     Real,
@@ -119,35 +119,37 @@ impl Standing {
     pub(super) fn all(spectrum: &Spectrum) -> Vec<Self> {
         let mut standings = vec![Self::None; spectrum.multiplets().len()];
         for class in spectrum.fermion_classes().into_iter().flatten() {
+            let (own, opposite) = (class.copies(), class.conjugate_copies());
             for &place in class.members() {
-                standings[place] = Self::within(&class, place, class.conjugate_members());
+                standings[place] = match class.reality() {
+                    Reality::Real => Self::Real,
+                    Reality::Pseudoreal => Self::pseudoreal(&class, place),
+                    Reality::Complex => Self::complex(own, opposite, class.conjugate_members()),
+                };
             }
             for &place in class.conjugate_members() {
-                standings[place] = Self::within(&class, place, class.members());
+                standings[place] = Self::complex(opposite, own, class.members());
             }
         }
         standings
     }
 
-    fn within(class: &FermionClass, place: usize, opposite: &[usize]) -> Self {
-        match (class.reality(), class.massive(), class.chiral()) {
-            (Reality::Real, ..) => Self::Real,
-            (_, 0, _) => Self::Chiral,
-            (Reality::Pseudoreal, _, left) => {
-                let others = class
-                    .members()
-                    .iter()
-                    .copied()
-                    .filter(|&other| other != place);
-                let others = others.collect();
-                if left == 0 {
-                    Self::VectorLike(others)
-                } else {
-                    Self::Partly(others)
-                }
-            }
-            (_, _, 0) => Self::VectorLike(opposite.to_vec()),
-            _ => Self::Partly(opposite.to_vec()),
+    fn pseudoreal(class: &FermionClass, place: usize) -> Self {
+        let others = class.members().iter().copied();
+        let others = others.filter(|&other| other != place).collect();
+        match (class.massive(), class.chiral()) {
+            (0, _) => Self::Chiral,
+            (_, 0) => Self::VectorLike(others),
+            _ => Self::Partly(others),
+        }
+    }
+
+    /// The side with fewer copies finds a partner for each.
+    fn complex(own: u64, opposite: u64, partners: &[usize]) -> Self {
+        match opposite {
+            0 => Self::Chiral,
+            _ if own <= opposite => Self::VectorLike(partners.to_vec()),
+            _ => Self::Partly(partners.to_vec()),
         }
     }
 

@@ -1,30 +1,18 @@
 //! Products, dominant characters and powers against GAP, over irreps drawn at random.
 //!
-//! The seed is printed; `GAP_SEED=<number>` gives it again.
+//! The seed is printed; `GAUGEWRIGHT_SEED=<number>` gives it again.
 
 use std::collections::{BTreeMap, HashMap};
-use std::io::Write;
 
 use num_bigint::{BigInt, BigUint};
 use outside_checks::gap::{numbers, run};
+
+use crate::support::seed;
 use roots::{Decomposition, Irrep, Partition, SimpleAlgebra};
 
 /// Every type of rank up to 8.
 fn algebras() -> Vec<SimpleAlgebra> {
     SimpleAlgebra::up_to_rank(8).collect()
-}
-
-fn seed() -> u64 {
-    let seed = std::env::var("GAP_SEED").ok().map_or_else(
-        || fastrand::u64(..),
-        |seed| seed.parse().expect("GAP_SEED is a whole number"),
-    );
-    // Not by `println!`, which the test runner would swallow.
-    let line = format!("seed {seed}: GAP_SEED={seed} repeats this run\n");
-    std::io::stderr()
-        .write_all(line.as_bytes())
-        .expect("standard error is open");
-    seed
 }
 
 /// For each node of ours its place in GAP's order, found by matching the two Cartan matrices:
