@@ -37,9 +37,38 @@ pub fn harmless(words: &str) -> Cow<'_, str> {
     out.into()
 }
 
+/// The words, each cut that is too long to be read, such as a file given in place of its name.
+#[must_use]
+pub fn brief(words: &str) -> Cow<'_, str> {
+    const READABLE: usize = 400;
+    const KEPT: usize = 100;
+    let long = |word: &str| word.len() > READABLE && word.chars().nth(READABLE).is_some();
+    if !words.split(' ').any(long) {
+        return words.into();
+    }
+    let cut = words
+        .split(' ')
+        .map(|word| match word.char_indices().nth(KEPT) {
+            Some((end, _)) if long(word) => format!("{}...", &word[..end]),
+            _ => word.to_owned(),
+        });
+    cut.collect::<Vec<_>>().join(" ").into()
+}
+
 #[cfg(test)]
 mod tests {
-    use super::harmless;
+    use super::{brief, harmless};
+
+    #[test]
+    fn only_long_words_are_cut() {
+        let (long, short) = ("\u{3bd}".repeat(401), "a ".repeat(401));
+        assert_eq!(brief(&short), short);
+        assert_eq!(brief(&long[..800]), long[..800]);
+        assert_eq!(
+            brief(&format!("a {long} b")),
+            format!("a {}... b", &long[..200])
+        );
+    }
 
     #[test]
     fn only_what_acts_is_written_out() {

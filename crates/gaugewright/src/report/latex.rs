@@ -85,7 +85,7 @@ fn write_table(out: &mut String, table: &Table) -> std::fmt::Result {
     for rows in table.rows().chunks(ROWS_PER_PAGE) {
         writeln!(
             out,
-            "\\begin{{flushleft}}\n{size}\\begin{{tabular}}{{{columns}}}"
+            "\\begin{{flushleft}}\n\\def\\arraystretch{{1.15}}\n{size}\\begin{{tabular}}{{{columns}}}"
         )?;
         writeln!(out, "\\hline\n{heads} \\\\ \\hline")?;
         for row in rows {
@@ -127,8 +127,17 @@ fn columns_in_letters(table: &Table) -> Vec<usize> {
 }
 
 fn cells<'a>(cells: impl IntoIterator<Item = &'a Phrase>) -> String {
-    let cells: Vec<String> = cells.into_iter().map(latex).collect();
+    let cells: Vec<String> = cells.into_iter().map(cell).collect();
     cells.join(" & ")
+}
+
+/// The phrase in a table, where fractions lie flat so that rows do not touch.
+fn cell(phrase: &Phrase) -> String {
+    let pieces = phrase.pieces().iter().map(|inline| match inline {
+        Inline::Number(value) => format!("${value}$"),
+        other => piece(other),
+    });
+    pieces.collect()
 }
 
 /// The phrase as LaTeX.

@@ -9,7 +9,7 @@ mod page;
 mod phrase;
 mod text;
 
-pub use harmless::{acts_on_terminals, harmless};
+pub use harmless::{acts_on_terminals, brief, harmless};
 pub use json::{Exact, Whole, to_json_line};
 pub use page::{Align, Block, Page, Table, Verdict};
 pub use phrase::{Inline, Phrase};

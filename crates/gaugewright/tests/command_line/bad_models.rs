@@ -48,7 +48,7 @@ fn one_line_at_a_time() {
 title = "Quarks" => titel = "Quarks" @ 2:1 did you mean "title"
 title = "Quarks" => title = 5 @ 2:9 quotation marks
 title = "Quarks" => title = "" @ 2:9 title
-title = "Quarks" => title = "Quarks @ 2:9 TOML
+title = "Quarks" => title = "Quarks @ 2:16 quotation marks
 label = "colour" => lable = "colour" @ 4:1 did you mean "label"
 algebra = "SU(3)" => algebra = "SU(1)" @ 5:11 SU(2) or larger
 algebra = "SU(3)" => algebra = "SO(4)" @ 5:11 SU(2) x SU(2)
@@ -56,8 +56,8 @@ algebra = "SU(3)" => algebra = "E9" @ 5:11 rank 6 to 8
 algebra = "SU(3)" => algebra = "SU(1000000)" @ 5:11 SU(257)
 algebra = "SU(3)" => algebra = 3 @ 5:11 SU(3)
 algebra = "SU(3)" => algebra = "Z(1)" @ 5:11 Z(
-label = "hypercharge" => label = "colour" @ 7:9 another
-label = "quark" => label = "antiquark" @ 15:9 another
+label = "hypercharge" => label = "colour" @ 7:9 label of its own
+label = "quark" => label = "antiquark" @ 15:9 label of its own
 label = "quark" => label = "" @ 10:9 label
 label = "quark" => label = "a\tb" @ 10:9 label
 field = "left-handed fermion" => field = "lefthanded fermion" @ 11:9 did you mean "left-handed fermion"
@@ -81,7 +81,7 @@ hypercharge = "1/6" => hypercharge = inf @ 13:44 fraction
 hypercharge = "1/6" => hypercharge = 0.5 @ 13:44 "1/2"
 hypercharge = "1/6" => hypercharge = [1, 6] @ 13:44 "1/6"
 mass_gev = 1e3 => mass_gev = -5 @ 19:12 GeV
-mass_gev = 1e3 => mass_gev = nan @ 19:12 GeV
+mass_gev = 1e3 => mass_gev = nan @ 19:12 750.5
 mass_gev = 1e3 => mas_gev = 5 @ 19:1 did you mean "mass_gev"
 "#;
     for case in cases.trim().lines() {

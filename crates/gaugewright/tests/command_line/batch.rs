@@ -28,6 +28,9 @@ fn pair(request: Value, arguments: &[&str]) -> Pair {
     )
 }
 
+/// How many of [`requests`] are neither a plain `irrep` nor `anomalies`; these come first.
+const OTHERS: usize = 7;
+
 fn requests() -> Vec<Pair> {
     let mut pairs = vec![
         pair(
@@ -65,6 +68,7 @@ fn requests() -> Vec<Pair> {
         ),
         pair(json!({"command": "audit"}), &["audit"]),
     ];
+    assert_eq!(pairs.len(), OTHERS);
     for (algebra, irrep) in [
         ("SU(5)", "10bar"),
         ("SO(10)", "(0,0,0,0,1)"),
@@ -82,7 +86,7 @@ fn requests() -> Vec<Pair> {
         .iter()
         .chain(&models("docs/models/broken"))
     {
-        let model: toml::Value = std::fs::read_to_string(path).unwrap().parse().unwrap();
+        let model: toml::Value = toml::from_str(&std::fs::read_to_string(path).unwrap()).unwrap();
         pairs.push(pair(
             json!({"command": "anomalies", "model": model}),
             &["anomalies", path],
@@ -103,9 +107,13 @@ fn ten_thousand_requests() {
             gaugewright(arguments.iter().chain(&format)).stdout
         })
         .collect();
-    // Mixed so that neighbours differ, and mostly what the issue names: irreps and anomalies.
+    // Mixed so that neighbours differ, and mostly what is asked most: irreps and anomalies.
+    let rest = pairs.len() - OTHERS;
     let chosen: Vec<usize> = (0..COUNT)
-        .map(|place| (place * 7 + place / 13) % pairs.len())
+        .map(|place| match place % 25 {
+            0 => (place / 25) % OTHERS,
+            _ => OTHERS + (place * 7 + place / 13) % rest,
+        })
         .collect();
     let lines: Vec<String> = pairs
         .iter()
@@ -242,9 +250,13 @@ fn lines_that_are_no_text() {
     let mut input = Vec::new();
     input.extend_from_slice(b"\xff\xfe{\n");
     input.extend_from_slice(format!("{good}\n").as_bytes());
+    let deep = format!(
+        "{{\"command\": \"anomalies\", \"model\": {}",
+        "[".repeat(100_000)
+    );
     // Longer than is read, and then a line that is answered.
     input.extend(std::iter::repeat_n(b'x', (4 << 20) + 10));
-    input.extend_from_slice(format!("\n{good}\n\0\n{}\n", "[".repeat(100_000)).as_bytes());
+    input.extend_from_slice(format!("\n{good}\n\0\n{deep}\n").as_bytes());
     // No newline at the end.
     input.extend_from_slice(good.as_bytes());
     let answers = answers(&input);

@@ -63,8 +63,8 @@ fn cartan_matrix() {
         assert_eq!(lengths.iter().max(), Some(&ratio(2, 1)));
         let entry = |i: usize, j: usize| fraction(&answer["cartan_matrix"][i][j]);
         let product = |i: usize, j: usize| entry(i, j) * &lengths[j] / ratio(2, 1);
-        for i in 0..lengths.len() {
-            assert_eq!(product(i, i), lengths[i]);
+        for (i, length) in lengths.iter().enumerate() {
+            assert_eq!(product(i, i), *length);
             for j in 0..i {
                 assert_eq!(product(i, j), product(j, i), "{algebra} {i} {j}");
             }

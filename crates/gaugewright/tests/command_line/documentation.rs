@@ -1,4 +1,4 @@
-//! README.md and docs/*.md say what is so: commands print what stands under them, model files can
+//! README.md, DEVELOPERS.md and docs/*.md say what is so: commands print what stands under them, model files can
 //! be read, Rust is compiled (by `guide.rs`), and no fence is left unchecked.
 //!
 //! In a ```` ```console ```` block a line `$ gaugewright ...` is run at the root of the workspace
@@ -12,7 +12,7 @@ use std::path::Path;
 use crate::run::{Run, gaugewright, with_input, workspace};
 
 /// Commands that the documentation may name beside `gaugewright`, and who runs them.
-const RUN_ELSEWHERE: [(&str, &str); 5] = [
+const RUN_ELSEWHERE: [(&str, &str); 6] = [
     (
         "cargo run --release -- audit",
         "the build of .ci/run, then the tests of this binary",
@@ -24,6 +24,10 @@ const RUN_ELSEWHERE: [(&str, &str); 5] = [
     ),
     ("cargo test --workspace", ".ci/run"),
     (".ci/run", "continuous integration itself"),
+    (
+        "cargo bench -p benches",
+        "by hand, on a quiet machine; .ci/run builds it",
+    ),
 ];
 
 /// A fenced block.
@@ -36,27 +40,25 @@ struct Fence {
     lines: Vec<String>,
 }
 
-/// README.md and the pages below docs, by path from the root.
+/// README.md, its neighbours and the pages in docs, by path from the root.
 fn pages() -> Vec<String> {
-    let root = workspace();
     let mut pages = Vec::new();
-    if root.join("README.md").exists() {
-        pages.push("README.md".to_owned());
-    } else {
-        let allowed = env::var_os("ALLOW_NO_README").is_some();
-        assert!(
-            allowed,
-            "README.md is missing; ALLOW_NO_README=1 does without"
-        );
-    }
-    for entry in fs::read_dir(root.join("docs")).expect("docs") {
-        let path = entry.expect("readable").path();
-        if path.extension() == Some("md".as_ref()) {
-            let name = path.file_name().unwrap().to_str().expect("UTF-8");
-            pages.push(format!("docs/{name}"));
+    for directory in ["", "docs/"] {
+        for entry in fs::read_dir(workspace().join(directory)).expect(directory) {
+            let name = entry.expect("readable").file_name();
+            let name = name.to_str().expect("UTF-8");
+            if name.ends_with(".md") {
+                pages.push(format!("{directory}{name}"));
+            }
         }
     }
     pages.sort();
+    let found = pages.iter().any(|page| page == "README.md");
+    let allowed = env::var_os("ALLOW_NO_README").is_some();
+    assert!(
+        found || allowed,
+        "README.md is missing; ALLOW_NO_README=1 does without"
+    );
     pages
 }
 
@@ -262,9 +264,33 @@ fn every_page_is_in_the_guide() {
     }
 }
 
+/// The paths that a page links to, without those of the web and of headings.
+fn links(text: &str) -> Vec<&str> {
+    let ends = text.split("](").skip(1);
+    let targets = ends.filter_map(|rest| rest.split([')', '#']).next());
+    targets
+        .filter(|target| !target.is_empty() && !target.contains("://"))
+        .collect()
+}
+
+#[test]
+fn links_lead_to_files() {
+    for page in pages() {
+        let path = workspace().join(&page);
+        let text = fs::read_to_string(&path).expect(&page);
+        for link in links(&text) {
+            let target = path.parent().expect("a directory").join(link);
+            assert!(
+                target.exists(),
+                "{page} links to {link}, which is not there"
+            );
+        }
+    }
+}
+
 /// The checks above can fail.
 mod the_checks_themselves {
-    use super::{Example, agree, check_example, examples, fences_in};
+    use super::{Example, agree, check_example, examples, fences_in, links};
 
     fn lines(text: &str) -> Vec<String> {
         text.lines().map(str::to_owned).collect()
@@ -280,6 +306,12 @@ mod the_checks_themselves {
             .collect();
         assert_eq!(seen, [(2, "console"), (7, "rust,should_panic")]);
         assert_eq!(fences[0].lines, ["$ x", "y"]);
+    }
+
+    #[test]
+    fn links_are_found() {
+        let text = "[a](docs/a.md), [b](b.md#part) [c](#here) [d](https://example.org/x)";
+        assert_eq!(links(text), ["docs/a.md", "b.md"]);
     }
 
     #[test]

@@ -58,18 +58,14 @@ fn every_command_compiles() {
         return;
     }
     compile(directory.path(), "document.tex");
-    for place in 0..COMMANDS.len() {
+    for (place, line) in COMMANDS.iter().enumerate() {
         let log = compile(directory.path(), &format!("answer{place}.tex"));
         for points in log
             .lines()
             .filter_map(|line| line.strip_prefix("Overfull \\hbox ("))
         {
             let points: f64 = points.split("pt").next().unwrap().parse().unwrap();
-            assert!(
-                points < 5.0,
-                "{}: {points} points too wide",
-                COMMANDS[place]
-            );
+            assert!(points < 5.0, "{line}: {points} points too wide");
         }
     }
 }

@@ -5,6 +5,7 @@ use std::io::{self, BufRead, BufReader, BufWriter, ErrorKind, Read, Write};
 use std::path::Path;
 
 use gaugewright::Failure;
+use gaugewright::report::{brief, to_json_line};
 use gaugewright::request::Request;
 use rayon::prelude::*;
 use roots::Numbering;
@@ -132,6 +133,9 @@ fn answer(line: &Line, numbering: Numbering) -> String {
     };
     match answered {
         Ok(answer) => answer.json(),
-        Err(why) => json!({ "error": why }).to_string(),
+        Err(why) => {
+            let error = json!({ "error": brief(&why) });
+            to_json_line(&error).expect("words have a JSON form")
+        }
     }
 }

@@ -4,14 +4,14 @@ use std::path::Path;
 
 use annotate_snippets::{AnnotationKind, Level, Renderer, Snippet};
 use gaugewright::Failure;
-use gaugewright::report::{acts_on_terminals, harmless};
+use gaugewright::report::{acts_on_terminals, brief, harmless};
 use model::ModelFileError;
 
 /// The words of a refusal; with colour where the terminal has it.
 pub(crate) fn complaint(failure: &Failure, colour: bool) -> String {
     match failure {
         Failure::ModelFile { path, error } => with_line(path, error, colour),
-        other => format!("gaugewright: {}", harmless(&other.to_string())),
+        other => format!("gaugewright: {}", brief(&harmless(&other.to_string()))),
     }
 }
 
@@ -20,7 +20,7 @@ fn with_line(path: &Path, error: &ModelFileError, colour: bool) -> String {
         (error.line(), error.column(), error.source_line())
     else {
         let words = format!("{}: {error}", path.display());
-        return format!("gaugewright: {}", harmless(&words));
+        return format!("gaugewright: {}", brief(&harmless(&words)));
     };
     let source: String = source.chars().map(seen).collect();
     let start = source
