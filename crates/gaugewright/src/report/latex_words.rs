@@ -290,7 +290,10 @@ mod tests {
     /// Whatever the words are, what pdflatex reads is ASCII, and braces and $ close.
     #[test]
     fn always_ascii() {
-        for code in (0..0x3000).chain(0x1_f900..0x1_fa00).filter_map(char::from_u32) {
+        for code in (0..0x3000)
+            .chain(0x1_f900..0x1_fa00)
+            .filter_map(char::from_u32)
+        {
             let word = escaped(&format!("{code}\u{301}\u{327}"));
             assert!(
                 word.is_ascii() && !word.contains(['\u{1b}', '\n']),
