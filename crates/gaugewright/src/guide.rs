@@ -1,3 +1,6 @@
 //! The pages of prose, so that `cargo test --doc` compiles and runs the Rust in each of them. What
 //! else they hold is checked by the tests of the command line, `documentation.rs`, among it that
 //! no page is missing here.
+
+#[doc = include_str!("../../../docs/products.md")]
+mod products {}
