@@ -165,3 +165,25 @@ fn products_catalogues_and_weights() {
     assert_eq!(of(json!([1, 0]))["multiplicity"], 1);
     assert_eq!(of(json!([0, 0]))["multiplicity"], 2);
 }
+
+/// A model file is in Slansky's numbering, so that it means one thing; what is said of it follows
+/// the option. 351' of E6 is (000020), and (000002) by plate V.
+#[test]
+fn models() {
+    let option = ["--numbering", "bourbaki"];
+    let line = ["audit", "docs/models/e6.toml"];
+    let labels = |answer: Value| {
+        let multiplets = answer["multiplets"].as_array().unwrap().clone();
+        let found = multiplets
+            .into_iter()
+            .find(|one| one["transforms"]["unified"] == "351'");
+        found.unwrap()["labels"]["unified"].clone()
+    };
+    assert_eq!(labels(json(line)), json!([0, 0, 0, 0, 2, 0]));
+    assert_eq!(
+        labels(json(line.into_iter().chain(option))),
+        json!([0, 0, 0, 0, 0, 2])
+    );
+    let text = gaugewright(line.into_iter().chain(option)).done();
+    assert!(text.contains("351' (000002)"), "{text}");
+}
