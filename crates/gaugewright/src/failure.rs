@@ -22,7 +22,7 @@ pub enum Failure {
     )]
     Request(String),
     /// A number that is none.
-    #[error("\"{written}\" is no {what}; write a whole number such as 1000")]
+    #[error("\"{written}\" is no whole number; write the {what} in digits, such as 1000")]
     Number {
         /// What was written.
         written: String,

@@ -26,6 +26,8 @@ pub use running;
 pub mod answer;
 pub mod bibliography;
 mod failure;
+#[cfg(doctest)]
+mod guide;
 pub mod report;
 pub mod request;
 

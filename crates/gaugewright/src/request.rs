@@ -1,12 +1,11 @@
 //! What is asked: one request, from the command line or from a line of a batch.
 
-use std::fmt;
-
 use model::Model;
 use num_bigint::BigUint;
 use roots::{CatalogBound, Irrep, Limits, Numbering, SimpleAlgebra};
 use serde::Deserialize;
-use serde::de::{self, Deserializer, SeqAccess, Visitor};
+use serde::de::{self, Deserializer};
+use serde_json::Value;
 
 use crate::Failure;
 use crate::answer::{
@@ -16,7 +15,12 @@ use crate::answer::{
 
 /// One request; the field names are those of a line of a batch.
 #[derive(Clone, Debug, Deserialize)]
-#[serde(tag = "command", rename_all = "lowercase", deny_unknown_fields)]
+#[serde(
+    tag = "command",
+    rename_all = "lowercase",
+    deny_unknown_fields,
+    expecting = "an object with the key \"command\""
+)]
 #[non_exhaustive]
 pub enum Request {
     /// Facts of one simple algebra.
@@ -101,7 +105,7 @@ impl Request {
     /// # Errors
     /// [`Failure::Request`] where the line is no request.
     pub fn from_json_line(line: &str) -> Result<Self, Failure> {
-        serde_json::from_str(line).map_err(|error| Failure::Request(error.to_string()))
+        serde_json::from_str(line).map_err(|error| Failure::Request(in_json_words(&error)))
     }
 
     /// The answer, with nodes in the order of `numbering`.
@@ -174,6 +178,23 @@ impl Request {
     }
 }
 
+/// The error in the words of JSON instead of those of a Rust type.
+fn in_json_words(error: &serde_json::Error) -> String {
+    let words = [
+        ("unknown variant", "unknown command"),
+        ("unknown field", "unknown key"),
+        ("missing field", "missing key"),
+        ("duplicate field", "duplicate key"),
+        ("expected variant identifier", "expected a JSON object"),
+        ("sequence", "list"),
+    ];
+    let mut said = error.to_string();
+    for (rust, json) in words {
+        said = said.replacen(rust, json, 1);
+    }
+    said
+}
+
 fn read_algebra(written: &str) -> Result<SimpleAlgebra, Failure> {
     Ok(written.parse()?)
 }
@@ -232,35 +253,46 @@ impl IrrepText {
 
 impl<'de> Deserialize<'de> for IrrepText {
     fn deserialize<D: Deserializer<'de>>(deserializer: D) -> Result<Self, D::Error> {
-        deserializer.deserialize_any(IrrepVisitor)
+        match Value::deserialize(deserializer)? {
+            Value::String(written) => Ok(Self::Written(written)),
+            Value::Number(dimension) if is_whole(&dimension) => {
+                Ok(Self::Written(dimension.to_string()))
+            }
+            Value::Array(labels) => {
+                let labels = labels.iter().map(label);
+                Ok(Self::Labels(labels.collect::<Result<_, _>>()?))
+            }
+            other => Err(de::Error::custom(format!(
+                "{} is no irrep: it is a name such as \"16\" or a list of Dynkin labels such as \
+                 [0,0,0,0,1]",
+                shown(&other)
+            ))),
+        }
     }
 }
 
-struct IrrepVisitor;
+fn is_whole(number: &serde_json::Number) -> bool {
+    number.as_str().bytes().all(|byte| byte.is_ascii_digit())
+}
 
-impl<'de> Visitor<'de> for IrrepVisitor {
-    type Value = IrrepText;
+fn label<E: de::Error>(value: &Value) -> Result<u32, E> {
+    let label = value.as_u64().and_then(|label| label.try_into().ok());
+    label.ok_or_else(|| {
+        let most = u32::MAX;
+        let value = shown(value);
+        E::custom(format!(
+            "{value} is no Dynkin label: labels are whole numbers from 0 to {most}"
+        ))
+    })
+}
 
-    fn expecting(&self, f: &mut fmt::Formatter<'_>) -> fmt::Result {
-        f.write_str(
-            "an irrep: a name such as \"16\" or a list of Dynkin labels such as [0,0,0,0,1]",
-        )
-    }
-
-    fn visit_str<E: de::Error>(self, written: &str) -> Result<IrrepText, E> {
-        Ok(IrrepText::Written(written.to_owned()))
-    }
-
-    fn visit_u64<E: de::Error>(self, dimension: u64) -> Result<IrrepText, E> {
-        Ok(IrrepText::Written(dimension.to_string()))
-    }
-
-    fn visit_seq<A: SeqAccess<'de>>(self, mut labels: A) -> Result<IrrepText, A::Error> {
-        let mut read = Vec::new();
-        while let Some(label) = labels.next_element()? {
-            read.push(label);
-        }
-        Ok(IrrepText::Labels(read))
+/// The value as it was written, cut where it is too long to repeat.
+fn shown(value: &Value) -> String {
+    const MOST: usize = 60;
+    let written = value.to_string();
+    match written.char_indices().nth(MOST) {
+        Some((end, _)) => format!("{}...", &written[..end]),
+        None => written,
     }
 }
 
@@ -288,10 +320,13 @@ impl From<String> for WholeText {
 
 impl<'de> Deserialize<'de> for WholeText {
     fn deserialize<D: Deserializer<'de>>(deserializer: D) -> Result<Self, D::Error> {
-        match serde_json::Value::deserialize(deserializer)? {
-            serde_json::Value::Number(number) => Ok(Self(number.to_string())),
-            serde_json::Value::String(written) => Ok(Self(written)),
-            other => Err(de::Error::custom(format!("{other} is no whole number"))),
+        match Value::deserialize(deserializer)? {
+            Value::Number(number) => Ok(Self(number.to_string())),
+            Value::String(written) => Ok(Self(written)),
+            other => Err(de::Error::custom(format!(
+                "{} is no whole number",
+                shown(&other)
+            ))),
         }
     }
 }
@@ -302,7 +337,7 @@ pub enum ModelText {
     /// A model that has been read.
     Read(Box<Model>),
     /// An object of the model file's shape.
-    Inline(serde_json::Value),
+    Inline(Value),
 }
 
 impl ModelText {
@@ -316,6 +351,6 @@ impl ModelText {
 
 impl<'de> Deserialize<'de> for ModelText {
     fn deserialize<D: Deserializer<'de>>(deserializer: D) -> Result<Self, D::Error> {
-        serde_json::Value::deserialize(deserializer).map(Self::Inline)
+        Value::deserialize(deserializer).map(Self::Inline)
     }
 }

@@ -5,6 +5,8 @@ use num_rational::BigRational;
 use serde::{Serialize, Serializer};
 use serde_json::Number;
 
+use super::acts_on_terminals;
+
 /// A quantity that can only be whole: a JSON number of any length.
 #[derive(Clone, Debug, PartialEq, Eq)]
 pub struct Whole(BigInt);
@@ -70,10 +72,23 @@ impl Serialize for Exact {
     }
 }
 
-/// One object on one line.
+/// One object on one line, with nothing in it that acts on a terminal.
 ///
 /// # Errors
 /// Where a value has no JSON form; none of this crate's answers is of that kind.
 pub fn to_json_line(answer: &impl Serialize) -> Result<String, serde_json::Error> {
-    serde_json::to_string(answer)
+    let line = serde_json::to_string(answer)?;
+    if !line.contains(acts_on_terminals) {
+        return Ok(line);
+    }
+    // Outside strings the line is ASCII, so what is found stands in one and may be escaped there.
+    let mut out = String::with_capacity(line.len() + 8);
+    for c in line.chars() {
+        if acts_on_terminals(c) {
+            out.push_str(&format!("\\u{:04x}", u32::from(c)));
+        } else {
+            out.push(c);
+        }
+    }
+    Ok(out)
 }

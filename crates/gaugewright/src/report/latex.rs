@@ -6,6 +6,8 @@ use num_rational::BigRational;
 use num_traits::Signed;
 use roots::IrrepName;
 
+use super::latex_words::escaped;
+use super::text::plain;
 use super::{Align, Block, Inline, Page, Phrase, Table, Verdict};
 
 /// Opens a document unless one is open: `\@nodocument` is an error message until
@@ -52,7 +54,7 @@ fn write_block(out: &mut String, block: &Block) {
             writeln!(
                 out,
                 "\\begin{{verbatim}}\n{}\n\\end{{verbatim}}",
-                lines.join("\n")
+                verbatim(lines)
             )
         }
     };
@@ -79,20 +81,63 @@ fn write_table(out: &mut String, table: &Table) -> std::fmt::Result {
         })
         .collect();
     let heads = cells(table.columns().iter().map(|(head, _)| head));
+    let (size, close) = fitted(table);
     for rows in table.rows().chunks(ROWS_PER_PAGE) {
-        writeln!(out, "\\begin{{flushleft}}\n\\begin{{tabular}}{{{columns}}}")?;
+        writeln!(
+            out,
+            "\\begin{{flushleft}}\n\\def\\arraystretch{{1.15}}\n{size}\\begin{{tabular}}{{{columns}}}"
+        )?;
         writeln!(out, "\\hline\n{heads} \\\\ \\hline")?;
         for row in rows {
             writeln!(out, "{} \\\\", cells(row))?;
         }
-        writeln!(out, "\\hline\n\\end{{tabular}}\n\\end{{flushleft}}")?;
+        writeln!(out, "\\hline\n\\end{{tabular}}{close}\n\\end{{flushleft}}")?;
     }
     Ok(())
 }
 
+/// What opens and closes a table so that it fits the line of an article: smaller type where it is
+/// wide, and beyond that an equal share of both margins.
+fn fitted(table: &Table) -> (&'static str, &'static str) {
+    // Points: a line, a letter times ten and the space at a column, from the size of the class.
+    const LINE: usize = 345;
+    let widths = columns_in_letters(table);
+    let (letters, columns) = (widths.iter().sum::<usize>(), widths.len());
+    let wide = |letter: usize, column: usize| letters * letter / 10 + columns * column > LINE;
+    if !wide(43, 12) {
+        ("", "")
+    } else if !wide(35, 6) {
+        ("\\footnotesize\\tabcolsep=3pt\n", "")
+    } else {
+        (
+            "\\scriptsize\\tabcolsep=2pt\n\\makebox[\\linewidth][c]{",
+            "}",
+        )
+    }
+}
+
+fn columns_in_letters(table: &Table) -> Vec<usize> {
+    let heads = table.columns().iter().enumerate();
+    let widest = heads.map(|(place, (head, _))| {
+        let cells = table.rows().iter().map(|row| &row[place]);
+        let letters = cells.chain([head]).map(|cell| plain(cell).chars().count());
+        letters.max().unwrap_or(0)
+    });
+    widest.collect()
+}
+
 fn cells<'a>(cells: impl IntoIterator<Item = &'a Phrase>) -> String {
-    let cells: Vec<String> = cells.into_iter().map(latex).collect();
+    let cells: Vec<String> = cells.into_iter().map(cell).collect();
     cells.join(" & ")
+}
+
+/// The phrase in a table, where fractions lie flat so that rows do not touch.
+fn cell(phrase: &Phrase) -> String {
+    let pieces = phrase.pieces().iter().map(|inline| match inline {
+        Inline::Number(value) => format!("${value}$"),
+        other => piece(other),
+    });
+    pieces.collect()
 }
 
 /// The phrase as LaTeX.
@@ -166,29 +211,15 @@ fn algebra(name: &str) -> String {
     factors.collect::<Vec<_>>().join(" \\times ")
 }
 
-/// Words with LaTeX's own characters made plain, and others than ASCII left to its input encoding.
-fn escaped(words: &str) -> String {
-    let mut out = String::with_capacity(words.len());
-    for c in words.chars() {
-        match c {
-            '\\' => out.push_str("\\textbackslash{}"),
-            '~' => out.push_str("\\textasciitilde{}"),
-            '^' => out.push_str("\\textasciicircum{}"),
-            '<' => out.push_str("$<$"),
-            '>' => out.push_str("$>$"),
-            '|' => out.push_str("$|$"),
-            // A bracket after a row's end or an \\item would be taken for its option.
-            '[' | ']' => {
-                out.push('{');
-                out.push(c);
-                out.push('}');
-            }
-            '&' | '%' | '$' | '#' | '_' | '{' | '}' => {
-                out.push('\\');
-                out.push(c);
-            }
-            other => out.push(other),
+/// Lines as they are, with `?` for what is not ASCII: nothing is a command in there.
+fn verbatim(lines: &[String]) -> String {
+    let ascii = |c: char| {
+        if c.is_ascii_graphic() || c == ' ' {
+            c
+        } else {
+            '?'
         }
-    }
-    out
+    };
+    let lines = lines.iter().map(|line| line.chars().map(ascii).collect());
+    lines.collect::<Vec<String>>().join("\n")
 }

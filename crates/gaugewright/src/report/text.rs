@@ -2,7 +2,9 @@
 
 use std::fmt::Write as _;
 
-use super::{Align, Block, Inline, Page, Phrase, Table, Verdict};
+use unicode_width::{UnicodeWidthChar, UnicodeWidthStr};
+
+use super::{Align, Block, Inline, Page, Phrase, Table, Verdict, harmless};
 
 /// Whether text carries terminal colours.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
@@ -12,6 +14,11 @@ pub enum Colour {
     /// Bold and colour by ANSI escape sequences.
     Ansi,
 }
+
+/// Columns of running text, the width that papers' listings and terminals share.
+const WIDTH: usize = 96;
+/// Columns left to a fact beside a long name.
+const NARROWEST: usize = 40;
 
 const BOLD: &str = "\x1b[1m";
 const FAINT: &str = "\x1b[2m";
@@ -36,20 +43,21 @@ impl Page {
 
 fn write_block(out: &mut String, block: &Block, colour: Colour) {
     match block {
-        Block::Title(words) => line(out, &painted(&plain(words), BOLD, colour)),
+        Block::Title(words) | Block::Section(words) => {
+            flow(out, &painted(&plain(words), BOLD, colour), 0);
+        }
         Block::Verdict(verdict, words) => {
             let (mark, paint) = match verdict {
                 Verdict::Consistent => ("consistent", GOOD),
                 Verdict::Inconsistent => ("NOT CONSISTENT", BAD),
             };
             let mark = painted(mark, paint, colour);
-            line(out, &format!("{mark}: {}", styled(words, colour)));
+            flow(out, &format!("{mark}: {}", styled(words, colour)), 0);
         }
-        Block::Section(words) => line(out, &painted(&plain(words), BOLD, colour)),
-        Block::Paragraph(words) => wrapped(out, &styled(words, colour)),
+        Block::Paragraph(words) => flow(out, &styled(words, colour), 0),
         Block::Facts(facts) => write_facts(out, facts, colour),
         Block::Table(table) => write_table(out, table, colour),
-        Block::Drawing(lines) => lines.iter().for_each(|drawn| line(out, drawn)),
+        Block::Drawing(lines) => lines.iter().for_each(|drawn| line(out, &harmless(drawn))),
     }
 }
 
@@ -58,14 +66,16 @@ fn line(out: &mut String, words: &str) {
     out.push('\n');
 }
 
-/// Breaks a paragraph at 96 columns, the width that papers' listings and terminals share.
-fn wrapped(out: &mut String, words: &str) {
-    const WIDTH: usize = 96;
+/// Writes words from column `indent` on, broken where they reach the width; what follows stands
+/// under the first. A word that is longer than a line, such as a number, is left whole.
+fn flow(out: &mut String, words: &str, indent: usize) {
+    let room = WIDTH.saturating_sub(indent).max(NARROWEST);
     let mut width = 0;
     for word in words.split_whitespace() {
         let long = shown_width(word);
-        if width > 0 && width + 1 + long > WIDTH {
+        if width > 0 && width + 1 + long > room {
             out.push('\n');
+            out.push_str(&" ".repeat(indent));
             width = 0;
         }
         if width > 0 {
@@ -75,6 +85,7 @@ fn wrapped(out: &mut String, words: &str) {
         out.push_str(word);
         width += long;
     }
+    out.truncate(out.trim_end_matches(' ').len());
     out.push('\n');
 }
 
@@ -88,7 +99,8 @@ fn write_facts(out: &mut String, facts: &[(Phrase, Phrase)], colour: Colour) {
     for (name, (_, fact)) in names.iter().zip(facts) {
         let gap = " ".repeat(widest - shown_width(name));
         let name = painted(name, FAINT, colour);
-        line(out, &format!("  {name}{gap}  {}", styled(fact, colour)));
+        let _ = write!(out, "  {name}{gap}  ");
+        flow(out, &styled(fact, colour), widest + 4);
     }
 }
 
@@ -143,7 +155,7 @@ fn styled(phrase: &Phrase, colour: Colour) -> String {
     let pieces = phrase.pieces().iter();
     pieces
         .map(|inline| match inline {
-            Inline::Strong(words) => painted(words, BOLD, colour),
+            Inline::Strong(words) => painted(&harmless(words), BOLD, colour),
             other => piece(other),
         })
         .collect()
@@ -151,7 +163,7 @@ fn styled(phrase: &Phrase, colour: Colour) -> String {
 
 fn piece(inline: &Inline) -> String {
     match inline {
-        Inline::Words(words) | Inline::Strong(words) => words.clone(),
+        Inline::Words(words) | Inline::Strong(words) => harmless(words).into_owned(),
         Inline::Irrep(name) => name.to_string(),
         Inline::Number(number) => number.to_string(),
         Inline::Algebra(name) | Inline::Labels(name) => name.clone(),
@@ -166,8 +178,11 @@ fn painted(words: &str, paint: &str, colour: Colour) -> String {
     }
 }
 
-/// Columns that the text takes: characters outside escape sequences.
+/// Columns that the text takes: none for escape sequences, two for wide characters.
 fn shown_width(text: &str) -> usize {
+    if !text.contains('\x1b') {
+        return text.width();
+    }
     let mut width = 0;
     let mut inside = false;
     for c in text.chars() {
@@ -175,7 +190,7 @@ fn shown_width(text: &str) -> usize {
             (false, '\x1b') => inside = true,
             (true, 'm') => inside = false,
             (true, _) => {}
-            (false, _) => width += 1,
+            (false, _) => width += c.width().unwrap_or(0),
         }
     }
     width

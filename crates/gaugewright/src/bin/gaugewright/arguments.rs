@@ -49,6 +49,7 @@ pub(crate) enum Command {
         /// The algebra's name, e.g. "SO(10)".
         algebra: String,
         /// A name such as 16bar, or Dynkin labels such as "(0,0,0,1,0)".
+        #[arg(allow_negative_numbers = true)]
         irrep: String,
         /// List its weights with their multiplicities.
         #[arg(long, value_enum, value_name = "WHICH")]
@@ -62,7 +63,7 @@ pub(crate) enum Command {
         /// The algebra's name, e.g. "SU(5)".
         algebra: String,
         /// Names or Dynkin labels, e.g. 10 10 5bar.
-        #[arg(required = true)]
+        #[arg(required = true, allow_negative_numbers = true)]
         irreps: Vec<String>,
         #[command(flatten)]
         limits: LimitArguments,
@@ -72,6 +73,7 @@ pub(crate) enum Command {
         /// The algebra's name, e.g. "SO(10)".
         algebra: String,
         /// A name such as 16, or Dynkin labels.
+        #[arg(allow_negative_numbers = true)]
         irrep: String,
         /// The degree; a partition tells it by itself.
         #[arg(long, value_name = "N")]
@@ -87,10 +89,15 @@ pub(crate) enum Command {
         /// The algebra's name, e.g. E8.
         algebra: String,
         /// List irreps up to this dimension; 1000 or 20 times the algebra's own unless given.
-        #[arg(long, value_name = "N", conflicts_with = "max_index")]
+        #[arg(
+            long,
+            value_name = "N",
+            conflicts_with = "max_index",
+            allow_negative_numbers = true
+        )]
         max_dimension: Option<String>,
         /// List irreps up to this Dynkin index.
-        #[arg(long, value_name = "N")]
+        #[arg(long, value_name = "N", allow_negative_numbers = true)]
         max_index: Option<String>,
         /// How many irreps may be listed.
         #[arg(long, value_name = "N")]
@@ -107,6 +114,10 @@ pub(crate) enum Command {
         model: Option<PathBuf>,
     },
     /// Requests as lines of JSON, one line of JSON out for each, in order.
+    ///
+    /// A request is e.g. {"command": "irrep", "algebra": "SO(10)", "irrep": "16"}, with the
+    /// command's arguments by name; a model is an object of the model file's shape. A bad line
+    /// gets {"error": ...} in its place. Answers are JSON whatever --format says.
     Batch {
         /// The file of requests; - is standard input.
         file: PathBuf,

@@ -1,10 +1,11 @@
 //! Many requests in one run: lines of JSON in, one line of JSON out for each, in order.
 
 use std::fs::File;
-use std::io::{self, BufRead, BufReader, BufWriter, ErrorKind, Write};
+use std::io::{self, BufRead, BufReader, BufWriter, ErrorKind, Read, Write};
 use std::path::Path;
 
 use gaugewright::Failure;
+use gaugewright::report::{brief, to_json_line};
 use gaugewright::request::Request;
 use rayon::prelude::*;
 use roots::Numbering;
@@ -12,8 +13,14 @@ use serde_json::json;
 
 use crate::exit_status::ExitStatus;
 
-/// Lines answered together on all cores before they are printed.
+/// Lines answered together on all cores before they are printed, at most.
 const LINES_AT_ONCE: usize = 512;
+
+/// Bytes read at a time: a file fills it, a pipe or terminal gives what it has.
+const BYTES_AT_ONCE: usize = 1 << 20;
+
+/// The lines of requests.
+type Lines = BufReader<Box<dyn Read>>;
 
 /// The longest line that is read; a model is far shorter.
 const LONGEST_LINE: usize = 4 << 20;
@@ -36,7 +43,9 @@ pub(crate) fn run(file: &Path, numbering: Numbering) -> Result<ExitStatus, Failu
             }
         }
         // What is answered is printed before more is read, so that a pipe can talk back and forth.
-        still_read(out.flush())?;
+        if !still_read(out.flush())? {
+            return Ok(ExitStatus::Done);
+        }
     }
     Ok(ExitStatus::Done)
 }
@@ -50,16 +59,17 @@ fn still_read(written: io::Result<()>) -> Result<bool, Failure> {
     }
 }
 
-fn open(file: &Path) -> Result<Box<dyn BufRead>, Failure> {
+fn open(file: &Path) -> Result<Lines, Failure> {
+    let buffered = |input: Box<dyn Read>| BufReader::with_capacity(BYTES_AT_ONCE, input);
     if file == Path::new("-") {
-        return Ok(Box::new(io::stdin().lock()));
+        return Ok(buffered(Box::new(io::stdin().lock())));
     }
     let opened = File::open(file).and_then(|opened| match opened.metadata()?.is_dir() {
         true => Err(io::Error::from(ErrorKind::IsADirectory)),
         false => Ok(opened),
     });
     match opened {
-        Ok(opened) => Ok(Box::new(BufReader::new(opened))),
+        Ok(opened) => Ok(buffered(Box::new(opened))),
         Err(error) => Err(Failure::unreadable(file, error)),
     }
 }
@@ -67,10 +77,11 @@ fn open(file: &Path) -> Result<Box<dyn BufRead>, Failure> {
 /// A line as read: text, or why it is none.
 type Line = Result<String, String>;
 
-/// The next lines, as many as are at hand but at least one; empty ones are left out.
-fn read_lines(lines: &mut Box<dyn BufRead>, file: &Path) -> Result<Vec<Line>, Failure> {
+/// The next lines, as many as are at hand but at least one; empty ones are left out. It never
+/// waits for a second line: whoever writes one and waits for its answer gets it.
+fn read_lines(lines: &mut Lines, file: &Path) -> Result<Vec<Line>, Failure> {
     let mut chunk = Vec::new();
-    while chunk.len() < LINES_AT_ONCE {
+    while chunk.is_empty() || (chunk.len() < LINES_AT_ONCE && lines.buffer().contains(&b'\n')) {
         match read_line(lines).map_err(|error| Failure::unreadable(file, error))? {
             None => break,
             Some(Ok(line)) if line.trim().is_empty() => {}
@@ -80,7 +91,7 @@ fn read_lines(lines: &mut Box<dyn BufRead>, file: &Path) -> Result<Vec<Line>, Fa
     Ok(chunk)
 }
 
-fn read_line(lines: &mut Box<dyn BufRead>) -> io::Result<Option<Line>> {
+fn read_line(lines: &mut Lines) -> io::Result<Option<Line>> {
     let mut bytes = Vec::new();
     let mut too_long = false;
     loop {
@@ -103,9 +114,13 @@ fn read_line(lines: &mut Box<dyn BufRead>) -> io::Result<Option<Line>> {
         }
     }
     Ok(Some(if too_long {
-        Err(format!("the line is longer than {LONGEST_LINE} bytes"))
+        let most = LONGEST_LINE >> 20;
+        Err(format!(
+            "the line is longer than {most} MiB; write one request on each line"
+        ))
     } else {
-        String::from_utf8(bytes).map_err(|_| "the line is not UTF-8 text".to_owned())
+        String::from_utf8(bytes)
+            .map_err(|_| "the line is not UTF-8 text; write JSON in UTF-8".to_owned())
     }))
 }
 
@@ -118,6 +133,9 @@ fn answer(line: &Line, numbering: Numbering) -> String {
     };
     match answered {
         Ok(answer) => answer.json(),
-        Err(why) => json!({ "error": why }).to_string(),
+        Err(why) => {
+            let error = json!({ "error": brief(&why) });
+            to_json_line(&error).expect("words have a JSON form")
+        }
     }
 }

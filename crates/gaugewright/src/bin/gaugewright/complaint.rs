@@ -4,13 +4,14 @@ use std::path::Path;
 
 use annotate_snippets::{AnnotationKind, Level, Renderer, Snippet};
 use gaugewright::Failure;
+use gaugewright::report::{acts_on_terminals, brief, harmless};
 use model::ModelFileError;
 
 /// The words of a refusal; with colour where the terminal has it.
 pub(crate) fn complaint(failure: &Failure, colour: bool) -> String {
     match failure {
         Failure::ModelFile { path, error } => with_line(path, error, colour),
-        other => format!("gaugewright: {other}"),
+        other => format!("gaugewright: {}", brief(&harmless(&other.to_string()))),
     }
 }
 
@@ -18,8 +19,10 @@ fn with_line(path: &Path, error: &ModelFileError, colour: bool) -> String {
     let (Some(line), Some(column), Some(source)) =
         (error.line(), error.column(), error.source_line())
     else {
-        return format!("gaugewright: {}: {error}", path.display());
+        let words = format!("{}: {error}", path.display());
+        return format!("gaugewright: {}", brief(&harmless(&words)));
     };
+    let source: String = source.chars().map(seen).collect();
     let start = source
         .char_indices()
         .nth(column - 1)
@@ -30,16 +33,28 @@ fn with_line(path: &Path, error: &ModelFileError, colour: bool) -> String {
         end += 1;
     }
     let path = path.display().to_string();
-    let snippet = Snippet::source(source)
+    let path = harmless(&path);
+    let snippet = Snippet::source(&source)
         .line_start(line)
-        .path(path.as_str())
+        .path(&*path)
         .annotation(AnnotationKind::Primary.span(start..end));
-    let title = Level::ERROR.primary_title(error.message()).element(snippet);
-    let report = [title.element(Level::HELP.message(error.help()))];
+    let title = Level::ERROR.primary_title(harmless(error.message()));
+    let help = Level::HELP.message(harmless(error.help()));
+    let report = [title.element(snippet).element(help)];
     let renderer = if colour {
         Renderer::styled()
     } else {
         Renderer::plain()
     };
     renderer.render(&report).to_string()
+}
+
+/// The character, or where it acts on terminals another of as many bytes, so that spans stay.
+/// Those of ASCII the renderer replaces itself.
+fn seen(c: char) -> char {
+    match (acts_on_terminals(c), c.len_utf8()) {
+        (true, 2) => '\u{a4}',
+        (true, 3) => '\u{fffd}',
+        _ => c,
+    }
 }
