@@ -255,6 +255,35 @@ fn global_symmetries_need_not_cancel() {
     assert_eq!(violated, ["w^2 b", "b^3", "gravity^2 b"]);
 }
 
+/// One global U(1) among three, at any place of the product, sets it free.
+#[test]
+fn three_different_charges() {
+    for global in 0..3 {
+        let symmetries = ["a", "b", "c"].into_iter().enumerate();
+        let mut spectrum = Spectrum::new(symmetries.map(|(place, label)| {
+            if place == global {
+                Symmetry::global(label, Group::U1)
+            } else {
+                Symmetry::gauge(label, Group::U1)
+            }
+        }))
+        .unwrap();
+        // (1,1,1) + (1,-1,-1) + (-1,1,-1) + (-1,-1,1): only the product of all three is left.
+        let signs = [[1, 1, 1], [1, -1, -1], [-1, 1, -1], [-1, -1, 1]];
+        for (place, [a, b, c]) in signs.into_iter().enumerate() {
+            let draft = left(&format!("f{place}")).under("a", a);
+            spectrum.add(draft.under("b", b).under("c", c)).unwrap();
+        }
+        let product = condition(&spectrum, "a b c");
+        assert_eq!(
+            (product.value().to_string(), product.kind()),
+            ("4".into(), Kind::Mixed)
+        );
+        assert!(!product.cancels() && !product.must_cancel());
+        assert_eq!(is_consistent(&spectrum), Ok(true));
+    }
+}
+
 #[test]
 fn an_unknown_charge_has_no_anomaly() {
     let spectrum = gauged(&[("y", "U(1)")], [left("psi").under("y", "?")]);

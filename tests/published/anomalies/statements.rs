@@ -7,7 +7,10 @@ use roots::SimpleAlgebra;
 
 use super::{consistent, gauged, left, value};
 
-fn with(symmetries: &[(&str, &str)], content: &[(&[&str], u32)]) -> Spectrum {
+/// What a multiplet is under each symmetry, and how many copies of it there are.
+type Row<'a> = (&'a [&'a str], u32);
+
+fn with(symmetries: &[(&str, &str)], content: &[Row<'_>]) -> Spectrum {
     let mut spectrum = gauged(symmetries);
     for (place, (parts, copies)) in content.iter().enumerate() {
         let mut draft = left(format!("f{place}")).copies(*copies);
@@ -97,7 +100,7 @@ fn unsafe_groups() {
 #[test]
 fn three_colours_for_the_leptons() {
     for colours in 0..=7u32 {
-        let mut content: Vec<(&[&str], u32)> = vec![(&["2", "-1/2"], 1), (&["1", "1"], 1)];
+        let mut content: Vec<Row<'_>> = vec![(&["2", "-1/2"], 1), (&["1", "1"], 1)];
         if colours > 0 {
             content.push((&["2", "1/6"], colours));
             content.push((&["1", "-2/3"], colours));
@@ -166,7 +169,7 @@ fn contents_of_unified_families() {
         ("Y", "U(1)"),
         ("B-L", "U(1)"),
     ];
-    let sixteen: [(&[&str], u32); 6] = [
+    let sixteen: [Row<'_>; 6] = [
         (&["3", "2", "1/6", "1/3"], 1),
         (&["3bar", "1", "-2/3", "-1/3"], 1),
         (&["3bar", "1", "1/3", "-1/3"], 1),
@@ -180,11 +183,11 @@ fn contents_of_unified_families() {
         rest.remove(missing);
         assert!(!consistent(&with(&standard, &rest)), "without {missing}");
     }
-    let five: [(&[&str], u32); 3] = [(&["10", "-1"], 1), (&["5bar", "3"], 1), (&["1", "-5"], 1)];
+    let five: [Row<'_>; 3] = [(&["10", "-1"], 1), (&["5bar", "3"], 1), (&["1", "-5"], 1)];
     assert!(consistent(&with(&[("g", "SU(5)"), ("X", "U(1)")], &five)));
-    let ten: [(&[&str], u32); 3] = [(&["16", "1"], 1), (&["10", "-2"], 1), (&["1", "4"], 1)];
+    let ten: [Row<'_>; 3] = [(&["16", "1"], 1), (&["10", "-2"], 1), (&["1", "4"], 1)];
     assert!(consistent(&with(&[("g", "SO(10)"), ("psi", "U(1)")], &ten)));
-    let both: [(&[&str], u32); 6] = [
+    let both: [Row<'_>; 6] = [
         (&["10", "-1", "1"], 1),
         (&["5bar", "3", "1"], 1),
         (&["1", "-5", "1"], 1),
@@ -194,7 +197,7 @@ fn contents_of_unified_families() {
     ];
     let symmetries = [("g", "SU(5)"), ("chi", "U(1)"), ("psi", "U(1)")];
     assert!(consistent(&with(&symmetries, &both)));
-    let thirds: [(&[&str], u32); 3] = [
+    let thirds: [Row<'_>; 3] = [
         (&["3", "3bar", "1"], 1),
         (&["1", "3", "3bar"], 1),
         (&["3bar", "1", "3"], 1),
@@ -210,7 +213,7 @@ fn contents_of_unified_families() {
 #[test]
 fn the_anomaly_of_su5_through_colour() {
     let standard = [("colour", "SU(3)"), ("weak", "SU(2)"), ("Y", "U(1)")];
-    let cases: [(&str, &[(&[&str], u32)]); 4] = [
+    let cases: [(&str, &[Row<'_>]); 4] = [
         ("5", &[(&["3", "1", "-1/3"], 1), (&["1", "2", "1/2"], 1)]),
         (
             "10",

@@ -228,6 +228,8 @@ fn gauginos(model: &Model) -> Vec<Gaugino> {
 fn needed(rule: Rule) -> String {
     match rule {
         Rule::Zero => "0".to_owned(),
+        // With gravity, a Z(2) has no condition.
+        Rule::MultipleOf(1) => "any whole number".to_owned(),
         Rule::MultipleOf(2) => "even".to_owned(),
         Rule::MultipleOf(modulus) => format!("multiple of {modulus}"),
     }
