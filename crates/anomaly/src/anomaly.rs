@@ -182,12 +182,11 @@ impl Anomaly {
     /// Its name, e.g. `colour^2 hypercharge`.
     #[must_use]
     pub fn name(self, spectrum: &Spectrum) -> String {
-        let powers: Vec<String> = self
-            .factors(spectrum)
-            .chunk_by(|left, right| left == right)
-            .map(|alike| match alike.len() {
-                1 => alike[0].clone(),
-                power => format!("{}^{power}", alike[0]),
+        let powers = powers(&self.factors(spectrum)).into_iter();
+        let powers: Vec<String> = powers
+            .map(|(label, power)| match power {
+                1 => label,
+                power => format!("{label}^{power}"),
             })
             .collect();
         let name = powers.join(" ");
@@ -196,6 +195,23 @@ impl Anomaly {
             _ => name,
         }
     }
+}
+
+/// Labels that follow each other alike, with how many there are; a label of more than one word
+/// stands in brackets, so that it is clear what a power belongs to.
+pub(crate) fn powers(factors: &[String]) -> Vec<(String, usize)> {
+    let alike = factors.chunk_by(|left, right| left == right);
+    let powers = alike.map(|alike| {
+        let label = &alike[0];
+        let one_word = label.chars().all(|c| c.is_alphanumeric() || c == '_');
+        let label = if one_word {
+            label.clone()
+        } else {
+            format!("({label})")
+        };
+        (label, alike.len())
+    });
+    powers.collect()
 }
 
 fn simple(spectrum: &Spectrum) -> impl Iterator<Item = (usize, SimpleAlgebra)> + '_ {

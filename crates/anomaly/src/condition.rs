@@ -122,6 +122,13 @@ impl Condition {
         &self.factors
     }
 
+    /// The symmetries in it as a product of powers: labels, in brackets where they are not one
+    /// word, with their exponents.
+    #[must_use]
+    pub fn powers(&self) -> Vec<(String, usize)> {
+        crate::anomaly::powers(&self.factors)
+    }
+
     /// The sum.
     #[must_use]
     pub const fn value(&self) -> &BigRational {

@@ -27,6 +27,14 @@ pub const WORKS: &[Work] = &[
         "L. Alvarez-Gaume, E. Witten, Gravitational anomalies, Nucl. Phys. B 234 (1984) 269",
     ),
     work(
+        "Baez-Huerta 2010",
+        "J. Baez, J. Huerta, The algebra of grand unified theories, Bull. Amer. Math. Soc. 47 (2010) 483, arXiv:0904.1556",
+    ),
+    work(
+        "Banks-Dine 1992",
+        "T. Banks, M. Dine, Note on discrete gauge anomalies, Phys. Rev. D 45 (1992) 1424",
+    ),
+    work(
         "Banks-Georgi 1976",
         "J. Banks, H. Georgi, Comment on gauge theories without anomalies, Phys. Rev. D 14 (1976) 1159",
     ),
@@ -73,6 +81,10 @@ pub const WORKS: &[Work] = &[
     work(
         "Fulton-Harris 1991",
         "W. Fulton, J. Harris, Representation Theory, Springer 1991",
+    ),
+    work(
+        "Geng-Marshak 1989",
+        "C. Q. Geng, R. E. Marshak, Uniqueness of quark and lepton representations in the standard model from the anomalies viewpoint, Phys. Rev. D 39 (1989) 693",
     ),
     work(
         "Georgi-Glashow 1972",
@@ -133,6 +145,10 @@ pub const WORKS: &[Work] = &[
     work(
         "McKay-Patera 1981",
         "W. G. McKay, J. Patera, Tables of Dimensions, Indices, and Branching Rules for Representations of Simple Lie Algebras, Dekker 1981",
+    ),
+    work(
+        "Minahan-Ramond-Warner 1990",
+        "J. A. Minahan, P. Ramond, R. C. Warner, A comment on anomaly cancellation in the standard model, Phys. Rev. D 41 (1990) 715",
     ),
     work(
         "Moody-Patera 1982",

@@ -54,7 +54,7 @@ pub enum Error {
         written: String,
     },
     /// The number of labels is not the rank.
-    #[error("{algebra} takes {expected} Dynkin labels, one per node; {found} were given")]
+    #[error("{algebra} takes {expected} Dynkin {}, one per node; {found} given", plural(.expected, "label"))]
     LabelCount {
         /// Name of the algebra.
         algebra: String,
@@ -217,6 +217,11 @@ pub enum Error {
         /// What was written.
         written: String,
     },
+}
+
+fn plural(count: &usize, noun: &str) -> String {
+    let ending = if *count == 1 { "" } else { "s" };
+    format!("{noun}{ending}")
 }
 
 fn ranks(family: Family) -> String {

@@ -45,7 +45,7 @@ fn expected(name: &str) -> (String, Vec<(&'static str, i64)>) {
             vec![("left parity", 12), ("right parity", 12)],
         ),
         "left-right" => (
-            "colour^3 cubic, colour^2 B-L mixed, left^2 B-L mixed, right^2 B-L mixed, B-L^3 cubic, \
+            "colour^3 cubic, colour^2 (B-L) mixed, left^2 (B-L) mixed, right^2 (B-L) mixed, (B-L)^3 cubic, \
              gravity^2 B-L gravitational, left parity global, right parity global"
                 .into(),
             vec![("left parity", 12), ("right parity", 12)],
@@ -161,7 +161,7 @@ fn guilt(name: &str) -> Vec<(&'static str, &'static str, &'static str)> {
     match name {
         "broken/b-minus-l-without-neutrinos" => vec![
             (
-                "B-L^3",
+                "(B-L)^3",
                 "-3",
                 "quark doublet 2/3, right-handed up quark -1/3, right-handed down quark -1/3, \
                  lepton doublet -6, right-handed electron 3",

@@ -237,10 +237,9 @@ fn needed(rule: Rule) -> String {
 
 /// The condition's name, powers raised.
 fn name(condition: &Condition) -> Phrase {
-    let powers = condition.factors().chunk_by(|left, right| left == right);
-    let powers = powers.map(|alike| {
-        let label = Phrase::from(alike[0].as_str());
-        match alike.len() {
+    let powers = condition.powers().into_iter().map(|(label, power)| {
+        let label = Phrase::from(label);
+        match power {
             2 => label.then(Phrase::symbol("^2", "^{2}")),
             3 => label.then(Phrase::symbol("^3", "^{3}")),
             _ => label,

@@ -179,7 +179,7 @@ impl Answer for DecompositionAnswer {
                 if term.multiplicity.value().is_one() {
                     name.clone()
                 } else {
-                    multiplicity.clone().then(" ").then(name.clone())
+                    multiplicity.clone().then("(").then(name.clone()).then(")")
                 }
             });
             page.paragraph(Phrase::from("= ").then(Phrase::join(terms, " + ")));

@@ -68,8 +68,8 @@ irrep | SU(5) | 0 -> "0"
 irrep | SU(5) | -5 -> "-5"
 irrep | SU(5) | 5/2 -> "5/2"
 irrep | SO(8) | 8 -> 8v = (1000), 8s = (0001), 8c = (0010)
-irrep | SU(5) | (1,0,0) -> 4 Dynkin labels & 3 were given
-irrep | SU(5) | (1,0,0,0,0) -> 4 Dynkin labels & 5 were given
+irrep | SU(5) | (1,0,0) -> 4 Dynkin labels & 3 given
+irrep | SU(5) | (1,0,0,0,0) -> 4 Dynkin labels & 5 given
 irrep | SU(5) | () -> Dynkin label
 irrep | SU(5) | (1,0,0,0 -> (1,0,0,0
 irrep | SU(5) | (-1,0,0,0) -> "-1" & from 0 to 4294967295

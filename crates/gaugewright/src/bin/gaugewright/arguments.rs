@@ -99,7 +99,7 @@ pub(crate) enum Command {
         /// List irreps up to this Dynkin index.
         #[arg(long, value_name = "N", allow_negative_numbers = true)]
         max_index: Option<String>,
-        /// How many irreps may be listed.
+        /// How many irreps may be listed; 100,000 unless given.
         #[arg(long, value_name = "N")]
         limit: Option<usize>,
     },
