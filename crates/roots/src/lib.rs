@@ -58,6 +58,8 @@ mod reality;
 mod reductive;
 mod reductive_product;
 mod root_system;
+#[cfg(feature = "serde")]
+mod serialisation;
 mod single_multiplicity;
 mod tensor_product;
 mod text;

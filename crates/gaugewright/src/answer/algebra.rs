@@ -155,7 +155,7 @@ impl AlgebraAnswer {
             (Phrase::from("node"), Align::Right),
             ("length squared".into(), Align::Right),
             ("irrep".into(), Align::Left),
-            ("Cartan row:".into(), Align::Left),
+            ("Cartan matrix".into(), Align::Left),
         ];
         columns.extend(nodes);
         let mut table = Table::new(columns);

@@ -11,9 +11,8 @@ use serde::Serialize;
 
 use super::anomalies::AnomaliesAnswer;
 use super::multiplets::{MultipletAnswer, Standing};
-use super::{Answer, audit_page};
 use crate::Failure;
-use crate::report::{Exact, Page, to_json_line};
+use crate::report::Exact;
 
 /// What `gaugewright audit` answers.
 #[derive(Clone, Debug, Serialize)]
@@ -122,6 +121,12 @@ impl AuditAnswer {
         })
     }
 
+    /// Whether every condition that must hold does.
+    #[must_use]
+    pub const fn is_consistent(&self) -> bool {
+        self.consistent
+    }
+
     pub(super) const fn model(&self) -> &Model {
         &self.of
     }
@@ -182,19 +187,5 @@ fn running_facts(model: &Model, coefficients: &[BetaCoefficient]) -> RunningFact
         one_loop: values.collect(),
         asymptotically_free: free.collect(),
         hypercharge_normalisation: model.hypercharge().map(|_| unified_normalisation().into()),
-    }
-}
-
-impl Answer for AuditAnswer {
-    fn json(&self) -> String {
-        to_json_line(self).expect("names and numbers have a JSON form")
-    }
-
-    fn page(&self) -> Page {
-        audit_page::lay_out(self)
-    }
-
-    fn is_refusal(&self) -> bool {
-        !self.consistent
     }
 }

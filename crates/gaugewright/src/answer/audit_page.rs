@@ -4,12 +4,27 @@ use model::{Field, Group, Model, Multiplet, Transformation};
 use num_traits::Zero;
 use roots::{NameBook, Numbering};
 
+use super::Answer;
 use super::audit::{AuditAnswer, unified_normalisation};
 use super::irrep::name_phrase;
 use super::multiplets::Standing;
-use crate::report::{Align, Page, Phrase, Table};
+use crate::report::{Align, Page, Phrase, Table, to_json_line};
 
-pub(super) fn lay_out(audit: &AuditAnswer) -> Page {
+impl Answer for AuditAnswer {
+    fn json(&self) -> String {
+        to_json_line(self).expect("names and numbers have a JSON form")
+    }
+
+    fn page(&self) -> Page {
+        lay_out(self)
+    }
+
+    fn is_refusal(&self) -> bool {
+        !self.is_consistent()
+    }
+}
+
+fn lay_out(audit: &AuditAnswer) -> Page {
     let model = audit.model();
     let mut page = Page::titled(model.title());
     audit.anomalies().tell_verdict(&mut page);
