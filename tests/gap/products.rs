@@ -173,7 +173,31 @@ fn random_dominant_characters() {
         }
     }
     assert!(cases.len() >= 100);
-    let lines = run(&script).expect("gap ran before");
+    assert_characters_agree(&script, &cases, &places);
+}
+
+/// The first irreps of E8, whose weights [McKay-Patera 1981] and [Bremner-Moody-Patera 1985]
+/// tabulate.
+#[test]
+fn characters_of_e8() {
+    let Some(places) = all_places() else { return };
+    let e8: SimpleAlgebra = "E8".parse().unwrap();
+    let cases = ["248", "3875", "27000", "30380", "147250", "779247"];
+    let cases = cases.map(|name| e8.read_irrep(name).unwrap());
+    let mut script = format!("L := {};\n", gap_algebra(e8));
+    for irrep in &cases {
+        let labels = to_gap(irrep, &places[&e8]);
+        script += &format!("Print(DominantCharacter(L,{labels}),\"\\n\");\n");
+    }
+    assert_characters_agree(&script, &cases, &places);
+}
+
+fn assert_characters_agree(
+    script: &str,
+    cases: &[Irrep],
+    places: &HashMap<SimpleAlgebra, Vec<usize>>,
+) {
+    let lines = run(script).expect("gap ran before");
     assert_eq!(lines.len(), cases.len());
     for (irrep, line) in cases.iter().zip(&lines) {
         let dominant = irrep.dominant_weights().unwrap().into_iter();

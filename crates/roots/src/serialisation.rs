@@ -86,7 +86,9 @@ mod tests {
     fn what_is_read_is_checked() {
         assert!(serde_json::from_str::<SimpleAlgebra>("\"SO(4)\"").is_err());
         let short = r#"{"algebra":"SU(3)","labels":[1]}"#;
-        let error = serde_json::from_str::<Irrep>(short).unwrap_err().to_string();
+        let error = serde_json::from_str::<Irrep>(short)
+            .unwrap_err()
+            .to_string();
         assert!(error.contains("SU(3) takes 2 Dynkin labels"), "{error}");
     }
 }

@@ -31,8 +31,8 @@ fn expected(name: &str) -> (String, Vec<(&'static str, i64)>) {
             (STANDARD_MODEL.into(), twelve)
         }
         "mssm" => (STANDARD_MODEL.into(), vec![("weak parity", 14)]),
-        "b-minus-l" => (with_second("B-L"), twelve),
-        "l-mu-minus-l-tau" => (with_second("L_mu-L_tau"), twelve),
+        "b-minus-l" => (with_second("(B-L)"), twelve),
+        "l-mu-minus-l-tau" => (with_second("(L_mu-L_tau)"), twelve),
         "lanternfish" => (with_second("lantern"), twelve),
         "su5" => ("unified^3 cubic".into(), vec![]),
         "flipped-su5" => (
@@ -46,7 +46,7 @@ fn expected(name: &str) -> (String, Vec<(&'static str, i64)>) {
         ),
         "left-right" => (
             "colour^3 cubic, colour^2 (B-L) mixed, left^2 (B-L) mixed, right^2 (B-L) mixed, (B-L)^3 cubic, \
-             gravity^2 B-L gravitational, left parity global, right parity global"
+             gravity^2 (B-L) gravitational, left parity global, right parity global"
                 .into(),
             vec![("left parity", 12), ("right parity", 12)],
         ),
@@ -76,8 +76,13 @@ fn coherent(model: &Model, report: &Report) {
             *powers.entry(factor).or_default() += 1;
         }
         for (label, power) in powers {
+            // Labels of several words stand in brackets.
+            let label = match label.contains(['-', ' ']) {
+                true => format!("({label})"),
+                false => label.to_owned(),
+            };
             let spelt = if power == 1 {
-                label.to_owned()
+                label
             } else {
                 format!("{label}^{power}")
             };
@@ -167,16 +172,16 @@ fn guilt(name: &str) -> Vec<(&'static str, &'static str, &'static str)> {
                  lepton doublet -6, right-handed electron 3",
             ),
             (
-                "gravity^2 B-L",
+                "gravity^2 (B-L)",
                 "-3",
                 "quark doublet 6, right-handed up quark -3, right-handed down quark -3, lepton \
                  doublet -6, right-handed electron 3",
             ),
         ],
         "broken/baryon-number" => vec![
-            ("weak^2 baryon number", "3", "quark doublet 3"),
+            ("weak^2 (baryon number)", "3", "quark doublet 3"),
             (
-                "hypercharge^2 baryon number",
+                "hypercharge^2 (baryon number)",
                 "-3/2",
                 "quark doublet 1/6, right-handed up quark -4/3, right-handed down quark -1/3",
             ),
