@@ -85,7 +85,10 @@ impl Anomaly {
         let discrete = discrete(spectrum).flat_map(move |discrete| {
             let gauge = simple(spectrum);
             let mixed = gauge.map(move |(gauge, _)| Self::GaugeSquaredDiscrete { gauge, discrete });
-            mixed.chain([Self::GravityDiscrete(discrete)])
+            // Any sum will do for a Z(2): a Majorana fermion of charge 1 may be heavy.
+            let group = spectrum.symmetries()[discrete].group();
+            let any_will_do = matches!(group, Group::Discrete(order) if order.get() == 2);
+            mixed.chain((!any_will_do).then_some(Self::GravityDiscrete(discrete)))
         });
         cubic
             .map(|(gauge, _)| Self::GaugeCubed(gauge))

@@ -35,6 +35,6 @@ mod verdict;
 
 pub use anomaly::{Anomaly, Kind};
 pub use condition::{Condition, Rule};
-pub use error::UnknownCharge;
+pub use error::{ReportError, UnknownCharge};
 pub use report::Report;
 pub use verdict::is_consistent;

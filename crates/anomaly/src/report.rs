@@ -2,7 +2,7 @@
 
 use model::Spectrum;
 
-use crate::{Anomaly, Condition, UnknownCharge};
+use crate::{Anomaly, Condition, ReportError};
 
 /// Every anomaly condition of a spectrum with its value.
 #[derive(Clone, Debug, PartialEq, Eq)]
@@ -11,11 +11,24 @@ pub struct Report {
 }
 
 impl Report {
+    /// The most shares, one for each condition and multiplet, that a report has.
+    pub const MOST_SHARES: usize = 2_000_000;
+
     /// Sums every anomaly of `spectrum`.
     ///
     /// # Errors
-    /// [`UnknownCharge`] where a charge is written `"?"`.
-    pub fn of(spectrum: &Spectrum) -> Result<Self, UnknownCharge> {
+    /// [`ReportError::TooLong`] beyond [`MOST_SHARES`](Self::MOST_SHARES);
+    /// [`ReportError::UnknownCharge`] where a charge is written `"?"`.
+    pub fn of(spectrum: &Spectrum) -> Result<Self, ReportError> {
+        let (conditions, multiplets) =
+            (Anomaly::all(spectrum).count(), spectrum.multiplets().len());
+        if conditions.saturating_mul(multiplets) > Self::MOST_SHARES {
+            return Err(ReportError::TooLong {
+                conditions,
+                multiplets,
+                most: Self::MOST_SHARES,
+            });
+        }
         let conditions = Anomaly::all(spectrum).map(|anomaly| Condition::of(anomaly, spectrum));
         Ok(Self {
             conditions: conditions.collect::<Result<_, _>>()?,

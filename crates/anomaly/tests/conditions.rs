@@ -1,6 +1,6 @@
 //! Which conditions a spectrum has, what they are called, what counts in them, and when they hold.
 
-use anomaly::{Anomaly, Condition, Kind, Report, Rule, is_consistent};
+use anomaly::{Anomaly, Condition, Kind, Report, ReportError, Rule, is_consistent};
 use model::{Field, Group, Multiplet, MultipletDraft, Spectrum, Symmetry};
 use num_rational::BigRational;
 
@@ -184,7 +184,6 @@ fn so6_as_su4() {
 #[test]
 fn moduli_of_discrete_conditions() {
     for (n, with_gravity) in [
-        (2, 1),
         (3, 3),
         (4, 2),
         (5, 5),
@@ -198,6 +197,16 @@ fn moduli_of_discrete_conditions() {
         assert_eq!(rule("w^2 z"), Rule::MultipleOf(n));
         assert_eq!(rule("gravity^2 z"), Rule::MultipleOf(with_gravity));
     }
+    // Any sum will do for gravity with a Z(2): there is no such condition.
+    let spectrum = gauged(&[("w", "SU(2)"), ("z", "Z(2)")], []);
+    assert_eq!(condition(&spectrum, "w^2 z").rule(), Rule::MultipleOf(2));
+    let report = Report::of(&spectrum).unwrap();
+    assert!(
+        report
+            .conditions()
+            .iter()
+            .all(|one| one.name() != "gravity^2 z")
+    );
 }
 
 /// Charges count modulo N however they are written, and a right-handed one is minus a left-handed.
@@ -288,6 +297,9 @@ fn three_different_charges() {
 fn an_unknown_charge_has_no_anomaly() {
     let spectrum = gauged(&[("y", "U(1)")], [left("psi").under("y", "?")]);
     let error = Report::of(&spectrum).unwrap_err();
+    let ReportError::UnknownCharge(error) = error else {
+        panic!("{error}");
+    };
     assert_eq!((&*error.multiplet, &*error.symmetry), ("psi", "y"));
     assert_eq!(is_consistent(&spectrum), Err(error));
     // A scalar's charge enters nothing.
@@ -304,4 +316,28 @@ fn symmetries_of_an_anomaly() {
     let kinds: Vec<Kind> = Anomaly::all(&spectrum).map(Anomaly::kind).collect();
     let (cubic, mixed, gravity) = (Kind::Cubic, Kind::Mixed, Kind::Gravitational);
     assert_eq!(kinds, [cubic, mixed, mixed, cubic, gravity, gravity]);
+}
+
+/// A spectrum within the bounds of the model file can have more conditions than a report holds.
+#[test]
+fn a_report_that_would_be_too_long_is_refused() {
+    let symmetries = (0..30).map(|i| Symmetry::gauge(format!("u{i}"), Group::U1));
+    let mut spectrum = Spectrum::new(symmetries).unwrap();
+    for i in 0..500 {
+        let draft = Multiplet::draft(format!("psi{i}"), Field::LeftHandedFermion);
+        spectrum.add(draft).unwrap();
+    }
+    // Triples of 30 U(1)s with repetition, and gravity with each.
+    let conditions = 30 * 31 * 32 / 6 + 30;
+    assert!(conditions * 500 > Report::MOST_SHARES);
+    let refused = Report::of(&spectrum).unwrap_err();
+    assert_eq!(
+        refused,
+        ReportError::TooLong {
+            conditions,
+            multiplets: 500,
+            most: Report::MOST_SHARES,
+        }
+    );
+    assert_eq!(is_consistent(&spectrum), Ok(true));
 }

@@ -29,9 +29,9 @@ pub enum Failure {
         /// What it should have been.
         what: &'static str,
     },
-    /// A charge that an answer needs and the model leaves open.
+    /// Anomalies that cannot be summed: a charge is unknown, or there are too many.
     #[error(transparent)]
-    UnknownCharge(#[from] anomaly::UnknownCharge),
+    Anomalies(#[from] anomaly::ReportError),
     /// A model that is wrong.
     #[error("model: {0}")]
     Model(#[from] model::ModelFileError),

@@ -1,7 +1,8 @@
 //! Beta coefficients of gauge couplings, exact.
 //!
 //! One convention throughout: `d alpha_i^-1 / d ln mu = -b_i / 2 pi` at one loop, so that a
-//! negative coefficient means asymptotic freedom; the Standard Model has (41/10, -19/6, -7).
+//! negative coefficient means asymptotic freedom. The Standard Model has (41/6, -19/6, -7) with
+//! hypercharge as it is written, 3/5 of the first, 41/10, in unified normalisation.
 //! ```
 //! use model::{Field, Multiplet, Spectrum, Symmetry};
 //! let mut spectrum = Spectrum::new([Symmetry::gauge("colour", "SU(3)".parse()?)])?;

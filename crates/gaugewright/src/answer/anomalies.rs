@@ -32,7 +32,7 @@ struct ConditionAnswer {
     kind: &'static str,
     factors: Vec<String>,
     value: Exact,
-    /// "0", or "multiple of N".
+    /// "0", "even" or "a multiple of N".
     cancels_if: String,
     cancels: bool,
     /// False where a global symmetry takes part.
@@ -60,7 +60,7 @@ impl AnomaliesAnswer {
     /// The conditions of `model`.
     ///
     /// # Errors
-    /// [`Failure::UnknownCharge`] where a charge is written `"?"`.
+    /// [`Failure::Anomalies`] where a charge is written `"?"`, or a report would be too long.
     pub fn new(model: &Model) -> Result<Self, Failure> {
         let spectrum = model.spectrum();
         let report = Report::of(spectrum)?;
@@ -105,9 +105,13 @@ impl AnomaliesAnswer {
             .count();
         let violated: Vec<&Condition> = self.report.violated().collect();
         match (required, violated.len()) {
-            (0, _) => page.verdict(
+            (0, _) if self.is_empty() => page.verdict(
                 Verdict::Consistent,
                 "these groups have no anomaly, whatever the multiplets",
+            ),
+            (0, _) => page.verdict(
+                Verdict::Consistent,
+                "the gauge symmetries have no anomaly; those below belong to global ones",
             ),
             (1, 0) => page.verdict(Verdict::Consistent, "the one anomaly condition holds"),
             (_, 0) => page.verdict(
@@ -229,9 +233,8 @@ fn needed(rule: Rule) -> String {
     match rule {
         Rule::Zero => "0".to_owned(),
         // With gravity, a Z(2) has no condition.
-        Rule::MultipleOf(1) => "any whole number".to_owned(),
         Rule::MultipleOf(2) => "even".to_owned(),
-        Rule::MultipleOf(modulus) => format!("multiple of {modulus}"),
+        Rule::MultipleOf(modulus) => format!("a multiple of {modulus}"),
     }
 }
 

@@ -5,6 +5,7 @@ use std::collections::BTreeMap;
 use model::{Model, Spectrum};
 use num_bigint::BigInt;
 use num_rational::BigRational;
+use num_traits::One;
 use roots::Numbering;
 use running::BetaCoefficient;
 use serde::Serialize;
@@ -67,9 +68,9 @@ struct States {
 #[derive(Clone, Debug, Serialize)]
 struct RunningFacts {
     loops: u8,
-    /// By label; hypercharge in unified normalisation.
-    one_loop: BTreeMap<String, Exact>,
-    asymptotically_free: BTreeMap<String, bool>,
+    /// By label; hypercharge in unified normalisation. None while a charge is unknown.
+    one_loop: BTreeMap<String, Option<Exact>>,
+    asymptotically_free: BTreeMap<String, Option<bool>>,
     /// k in alpha_1 = k alpha_Y, where the model has a hypercharge.
     #[serde(skip_serializing_if = "Option::is_none")]
     hypercharge_normalisation: Option<Exact>,
@@ -85,7 +86,7 @@ impl AuditAnswer {
     /// Everything about `model`, labels of irreps in `order`.
     ///
     /// # Errors
-    /// [`Failure::UnknownCharge`] where a charge is written `"?"`.
+    /// [`Failure::Anomalies`] where a charge is written `"?"`, or a report would be too long.
     pub fn new(model: Model, order: Numbering) -> Result<Self, Failure> {
         let anomalies = AnomaliesAnswer::new(&model)?;
         let coefficients = running::one_loop(&model);
@@ -167,25 +168,35 @@ fn symmetry_facts(spectrum: &Spectrum) -> Vec<SymmetryFacts> {
 
 fn running_facts(model: &Model, coefficients: &[BetaCoefficient]) -> RunningFacts {
     let label = |one: &BetaCoefficient| {
-        model.spectrum().symmetries()[one.symmetry()]
-            .label()
-            .to_owned()
+        let symmetry = &model.spectrum().symmetries()[one.symmetry()];
+        symmetry.label().to_owned()
     };
-    let values = coefficients.iter().filter_map(|one| {
-        let value = one.value()?;
-        let unified = match model.hypercharge() {
-            Some(place) if place == one.symmetry() => value / unified_normalisation(),
-            _ => value,
-        };
-        Some((label(one), unified.into()))
-    });
+    let value = |one: &BetaCoefficient| unified(model, one).or_else(|| one.value());
+    let values = coefficients
+        .iter()
+        .map(|one| (label(one), value(one).map(Exact::from)));
     let free = coefficients
         .iter()
-        .filter_map(|one| Some((label(one), one.is_asymptotically_free()?)));
+        .map(|one| (label(one), one.is_asymptotically_free()));
     RunningFacts {
         loops: 1,
         one_loop: values.collect(),
         asymptotically_free: free.collect(),
         hypercharge_normalisation: model.hypercharge().map(|_| unified_normalisation().into()),
     }
+}
+
+/// The coefficient of the hypercharge in unified normalisation; `None` for other symmetries, and
+/// while a charge is unknown.
+///
+/// Y is the charge as it is written times its coefficient in the electric charge.
+pub(super) fn unified(model: &Model, coefficient: &BetaCoefficient) -> Option<BigRational> {
+    let place = model
+        .hypercharge()
+        .filter(|&place| place == coefficient.symmetry())?;
+    let scale = model
+        .electric_charge()
+        .and_then(|charge| charge.coefficients(place).first());
+    let scale = scale.cloned().unwrap_or_else(BigRational::one);
+    Some(coefficient.value()? * scale.pow(2) / unified_normalisation())
 }

@@ -1,11 +1,11 @@
 //! The audit as a page: the verdict first, then why, then what the model is.
 
-use model::{Field, Group, Model, Multiplet, Transformation};
+use model::{Field, Model, Multiplet, Transformation};
 use num_traits::Zero;
 use roots::{NameBook, Numbering};
 
 use super::Answer;
-use super::audit::{AuditAnswer, unified_normalisation};
+use super::audit::{AuditAnswer, unified, unified_normalisation};
 use super::irrep::name_phrase;
 use super::multiplets::Standing;
 use crate::report::{Align, Page, Phrase, Table, to_json_line};
@@ -49,10 +49,7 @@ fn symmetry(audit: &AuditAnswer, page: &mut Page) {
     page.section("Symmetry and states");
     let mut facts: Vec<(Phrase, Phrase)> = Vec::new();
     for symmetry in model.spectrum().symmetries() {
-        let group = match symmetry.group() {
-            Group::Discrete(order) => Phrase::from(format!("Z{}", order.get())),
-            group @ (Group::Simple(_) | Group::U1) => Phrase::algebra(group),
-        };
+        let group = Phrase::algebra(symmetry.group());
         let kind = if symmetry.is_gauged() { "" } else { ", global" };
         facts.push((symmetry.label().into(), group.then(kind)));
     }
@@ -234,6 +231,7 @@ fn running(audit: &AuditAnswer, page: &mut Page) {
     for coefficient in audit.coefficients() {
         let label = model.spectrum().symmetries()[coefficient.symmetry()].label();
         let Some(value) = coefficient.value() else {
+            table.push([label.into(), "unknown".into(), "a charge is \"?\"".into()]);
             continue;
         };
         let free = match coefficient.is_asymptotically_free() {
@@ -241,14 +239,11 @@ fn running(audit: &AuditAnswer, page: &mut Page) {
             Some(false) if value.is_zero() => "no, constant",
             _ => "no",
         };
-        let remark = match model.hypercharge() {
-            Some(place) if place == coefficient.symmetry() => {
-                let unified = &value / unified_normalisation();
-                Phrase::from(unified)
-                    .then(" in unified normalisation, k = ")
-                    .then(unified_normalisation())
-            }
-            _ => Phrase::new(),
+        let remark = match unified(model, coefficient) {
+            Some(unified) => Phrase::from(unified)
+                .then(" in unified normalisation, k = ")
+                .then(unified_normalisation()),
+            None => Phrase::new(),
         };
         table.push([label.into(), value.into(), free.into(), remark]);
     }

@@ -40,7 +40,7 @@ struct Term {
 #[derive(Clone, Debug, PartialEq, Eq)]
 pub struct PowerSymmetry {
     partition: Partition,
-    written: String,
+    name: String,
 }
 
 impl PowerSymmetry {
@@ -51,12 +51,12 @@ impl PowerSymmetry {
     /// [`Failure::Power`] where the two do not fit together, or what is wrong with the partition.
     pub fn read(symmetry: &str, degree: Option<u32>) -> Result<Self, Failure> {
         let written = symmetry.trim().to_ascii_lowercase();
-        let partition = match (written.as_str(), degree) {
+        let (partition, name) = match (written.as_str(), degree) {
             ("symmetric" | "antisymmetric", None) => {
                 return Err(Failure::Power(format!("a {written} power needs a degree")));
             }
-            ("symmetric", Some(degree)) => Partition::row(degree)?,
-            ("antisymmetric", Some(degree)) => Partition::column(degree)?,
+            ("symmetric", Some(degree)) => (Partition::row(degree)?, written),
+            ("antisymmetric", Some(degree)) => (Partition::column(degree)?, written),
             (partition, degree) => {
                 let partition: Partition = partition.parse()?;
                 let size = partition.size();
@@ -64,10 +64,11 @@ impl PowerSymmetry {
                     let words = format!("the partition {written} is of {size}, not of the degree");
                     return Err(Failure::Power(words));
                 }
-                partition
+                let name = partition.to_string();
+                (partition, name)
             }
         };
-        Ok(Self { partition, written })
+        Ok(Self { partition, name })
     }
 }
 
@@ -106,14 +107,14 @@ impl DecompositionAnswer {
         let power = irrep.power_within(&symmetry.partition, limits)?;
         let mut names = NameBook::new(irrep.algebra());
         let degree = symmetry.partition.size();
-        let title = Phrase::from(format!("{} part of degree {degree} of ", symmetry.written))
+        let title = Phrase::from(format!("{} part of degree {degree} of ", symmetry.name))
             .then(name_phrase(&mut names, irrep, order))
             .then(" of ")
             .then(Phrase::algebra(irrep.algebra()));
         let factors = vec![irrep.clone(); degree as usize];
         Ok(Self {
             degree: Some(degree),
-            symmetry: Some(symmetry.written.clone()),
+            symmetry: Some(symmetry.name.clone()),
             ..Self::new(&power, &factors, title, &mut names, order)
         })
     }
@@ -173,6 +174,10 @@ impl Answer for DecompositionAnswer {
 
     fn page(&self) -> Page {
         let mut page = Page::titled(self.title.clone());
+        if self.terms.is_empty() {
+            page.paragraph("= 0");
+            return page;
+        }
         if (1..=MOST_ON_A_LINE).contains(&self.terms.len()) {
             let terms = self.terms.iter().map(|term| {
                 let [multiplicity, name, ..] = &term.cells;

@@ -3,6 +3,7 @@
 use std::collections::BTreeMap;
 
 use model::{FermionClass, Model, Multiplet, Spectrum};
+use num_rational::BigRational;
 use roots::{Numbering, Reality};
 use serde::Serialize;
 
@@ -31,7 +32,7 @@ pub(super) struct MultipletAnswer {
     #[serde(skip_serializing_if = "Vec::is_empty")]
     partners: Vec<String>,
     #[serde(skip_serializing_if = "Option::is_none")]
-    mass_gev: Option<Exact>,
+    mass_gev: Option<serde_json::Number>,
 }
 
 #[derive(Clone, Debug, Serialize)]
@@ -86,7 +87,7 @@ impl MultipletAnswer {
             partners: standing
                 .map(|one| one.partner_labels(model.spectrum()))
                 .unwrap_or_default(),
-            mass_gev: multiplet.mass_gev().cloned().map(Exact::from),
+            mass_gev: multiplet.mass_gev().and_then(decimal),
         }
     }
 
@@ -97,6 +98,11 @@ impl MultipletAnswer {
             .flatten()
             .map(|one| &one.charge)
     }
+}
+
+/// The number as it may stand in a model file.
+fn decimal(value: &BigRational) -> Option<serde_json::Number> {
+    model::write_decimal(value)?.parse().ok()
 }
 
 /// Whether the gauge symmetries let a multiplet's fermions have a mass.

@@ -50,13 +50,6 @@ fn write_block(out: &mut String, block: &Block) {
         }
         Block::Facts(facts) => write_facts(out, facts),
         Block::Table(table) => write_table(out, table),
-        Block::Drawing(lines) => {
-            writeln!(
-                out,
-                "\\begin{{verbatim}}\n{}\n\\end{{verbatim}}",
-                verbatim(lines)
-            )
-        }
     };
 }
 
@@ -104,9 +97,9 @@ fn fitted(table: &Table) -> (&'static str, &'static str) {
     let widths = columns_in_letters(table);
     let (letters, columns) = (widths.iter().sum::<usize>(), widths.len());
     let wide = |letter: usize, column: usize| letters * letter / 10 + columns * column > LINE;
-    if !wide(43, 12) {
+    if !wide(47, 12) {
         ("", "")
-    } else if !wide(35, 6) {
+    } else if !wide(38, 6) {
         ("\\footnotesize\\tabcolsep=3pt\n", "")
     } else {
         (
@@ -209,17 +202,4 @@ fn algebra(name: &str) -> String {
             },
         });
     factors.collect::<Vec<_>>().join(" \\times ")
-}
-
-/// Lines as they are, with `?` for what is not ASCII: nothing is a command in there.
-fn verbatim(lines: &[String]) -> String {
-    let ascii = |c: char| {
-        if c.is_ascii_graphic() || c == ' ' {
-            c
-        } else {
-            '?'
-        }
-    };
-    let lines = lines.iter().map(|line| line.chars().map(ascii).collect());
-    lines.collect::<Vec<String>>().join("\n")
 }

@@ -76,8 +76,6 @@ pub enum Block {
     Facts(Vec<(Phrase, Phrase)>),
     /// A table.
     Table(Table),
-    /// Lines to be kept as they are, such as a diagram.
-    Drawing(Vec<String>),
 }
 
 /// A report.
@@ -125,10 +123,5 @@ impl Page {
     /// Adds a table.
     pub fn table(&mut self, table: Table) {
         self.blocks.push(Block::Table(table));
-    }
-
-    /// Adds lines to be kept as they are.
-    pub fn drawing(&mut self, lines: Vec<String>) {
-        self.blocks.push(Block::Drawing(lines));
     }
 }

@@ -57,7 +57,6 @@ fn write_block(out: &mut String, block: &Block, colour: Colour) {
         Block::Paragraph(words) => flow(out, &styled(words, colour), 0),
         Block::Facts(facts) => write_facts(out, facts, colour),
         Block::Table(table) => write_table(out, table, colour),
-        Block::Drawing(lines) => lines.iter().for_each(|drawn| line(out, &harmless(drawn))),
     }
 }
 

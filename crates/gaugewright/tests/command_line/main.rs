@@ -2,6 +2,7 @@
 //! held to what it promises about streams, exit status, JSON, bad input, batches, LaTeX and
 //! screens, and to every example that the documentation prints.
 
+mod audits;
 mod bad_input;
 mod bad_models;
 mod batch;
