@@ -2,11 +2,11 @@
 
 use num_bigint::BigInt;
 use num_rational::BigRational;
-use num_traits::One;
 use roots::{Numbering, SimpleAlgebra};
 use serde::Serialize;
 
 use super::Answer;
+use super::irrep::name_and_labels;
 use crate::report::{Align, Exact, Page, Phrase, Table, Whole, to_json_line};
 
 /// What `gaugewright algebra` answers. Lists with one entry per node are in `numbering`'s order.
@@ -140,9 +140,7 @@ impl AlgebraAnswer {
     fn adjoint_phrase(&self) -> Phrase {
         let adjoint = self.of.adjoint();
         let mut names = roots::NameBook::new(self.of);
-        Phrase::from(names.name(&adjoint))
-            .then(" ")
-            .then(Phrase::labels(adjoint.bracketed_in(self.order)))
+        name_and_labels(&mut names, &adjoint, self.order)
     }
 
     fn show_nodes(&self, page: &mut Page) {
@@ -167,7 +165,7 @@ impl AlgebraAnswer {
             let fundamental = self.of.irrep(&labels).expect("one label per node");
             let cells = [
                 Phrase::from(node + 1),
-                self.length(node),
+                self.simple_root_lengths[node].value().clone().into(),
                 names.name(&fundamental).into(),
                 Phrase::new(),
             ];
@@ -175,13 +173,6 @@ impl AlgebraAnswer {
             table.push(cells.into_iter().chain(row));
         }
         page.table(table);
-    }
-
-    fn length(&self, node: usize) -> Phrase {
-        let ratios = self.of.dynkin_diagram().length_ratios().to_vec();
-        let longest = ratios.iter().copied().max().unwrap_or(1);
-        let ratio = ratios[self.order.places(self.of.cartan_type())[node]];
-        BigRational::new((2 * ratio).into(), longest.into()).into()
     }
 }
 
@@ -195,10 +186,9 @@ fn highest_root_phrase(coefficients: &[u8]) -> Phrase {
         )
         .into();
     }
-    let one = u8::one();
     let terms = coefficients.iter().enumerate().map(|(node, &times)| {
         let root = format!("a{}", node + 1);
-        Phrase::from(if times == one {
+        Phrase::from(if times == 1 {
             root
         } else {
             format!("{times} {root}")

@@ -6,7 +6,7 @@ use roots::{NameBook, Numbering};
 
 use super::Answer;
 use super::audit::{AuditAnswer, unified, unified_normalisation};
-use super::irrep::name_phrase;
+use super::irrep::name_and_labels;
 use super::multiplets::Standing;
 use crate::report::{Align, Page, Phrase, Table, to_json_line};
 
@@ -154,13 +154,7 @@ impl Names {
         match (multiplet.transformation(place), &mut self.books[place]) {
             (Transformation::Irrep(irrep), Some(_)) if irrep.is_singlet() => "1".into(),
             (Transformation::Irrep(irrep), Some(names)) => {
-                let name = name_phrase(names, irrep, self.order);
-                let labels = Phrase::labels(irrep.bracketed_in(self.order));
-                if name == labels {
-                    labels
-                } else {
-                    name.then(" ").then(labels)
-                }
+                name_and_labels(names, irrep, self.order)
             }
             (Transformation::Charge(charge), _) => charge.clone().into(),
             (other, _) => other.to_string().into(),

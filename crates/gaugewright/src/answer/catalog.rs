@@ -5,7 +5,7 @@ use roots::{CatalogBound, Error, Irrep, NameBook, Numbering, SimpleAlgebra};
 use serde::Serialize;
 
 use super::Answer;
-use super::irrep::{Class, labels, written_name};
+use super::irrep::{Class, labels, name_phrase, written_name};
 use crate::report::{Align, Page, Phrase, Table, Whole, to_json_line};
 
 /// Irreps that a catalogue lists unless told otherwise.
@@ -85,15 +85,11 @@ impl CatalogAnswer {
 fn entry(names: &mut NameBook, irrep: &Irrep, order: Numbering) -> CatalogEntry {
     let (dimension, index, cubic) = (irrep.dimension(), irrep.dynkin_index(), irrep.cubic_index());
     let reality = irrep.reality().to_string();
-    let name = match names.name(irrep) {
-        roots::IrrepName::Labels(_) => Phrase::labels(irrep.bracketed_in(order)),
-        name @ roots::IrrepName::Dimension { .. } => name.into(),
-    };
     CatalogEntry {
         labels: labels(irrep, order),
         name: written_name(names, irrep, order),
         cells: [
-            name,
+            name_phrase(names, irrep, order),
             Phrase::labels(irrep.bracketed_in(order)),
             dimension.clone().into(),
             index.clone().into(),

@@ -134,15 +134,7 @@ impl Answer for IrrepAnswer {
 
     fn page(&self) -> Page {
         let mut names = NameBook::new(self.of.algebra());
-        let mut named = |irrep: &Irrep| {
-            let name = name_phrase(&mut names, irrep, self.order);
-            let labels = Phrase::labels(irrep.bracketed_in(self.order));
-            if name == labels {
-                labels
-            } else {
-                name.then(" ").then(labels)
-            }
-        };
+        let mut named = |irrep: &Irrep| name_and_labels(&mut names, irrep, self.order);
         let title = named(&self.of)
             .then(" of ")
             .then(Phrase::algebra(&self.algebra));
@@ -192,6 +184,17 @@ pub(super) fn name_phrase(names: &mut NameBook, irrep: &Irrep, order: Numbering)
     match names.name(irrep) {
         roots::IrrepName::Labels(_) => Phrase::labels(irrep.bracketed_in(order)),
         name @ roots::IrrepName::Dimension { .. } => name.into(),
+    }
+}
+
+/// The name with the labels beside it; the labels alone where they are the name.
+pub(super) fn name_and_labels(names: &mut NameBook, irrep: &Irrep, order: Numbering) -> Phrase {
+    let name = name_phrase(names, irrep, order);
+    let labels = Phrase::labels(irrep.bracketed_in(order));
+    if name == labels {
+        labels
+    } else {
+        name.then(" ").then(labels)
     }
 }
 
