@@ -35,6 +35,12 @@ pub enum Failure {
     /// A model that is wrong.
     #[error("model: {0}")]
     Model(#[from] model::ModelFileError),
+    /// A model in JSON with a key written twice in one object.
+    #[error("model: {path}: this key is written twice in one object; write it once")]
+    RepeatedKey {
+        /// Where the second one stands, such as `multiplet[0].copies`.
+        path: String,
+    },
     /// A model file with a mistake.
     #[error("{}: {error}", .path.display())]
     ModelFile {

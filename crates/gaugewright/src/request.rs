@@ -7,6 +7,11 @@ use serde::Deserialize;
 use serde::de::{self, Deserializer};
 use serde_json::Value;
 
+#[path = "unique_json.rs"]
+mod unique_json;
+
+pub use unique_json::UniqueJson;
+
 use crate::Failure;
 use crate::answer::{
     AlgebraAnswer, AnomaliesAnswer, Answer, AuditAnswer, CATALOG_LIMIT, CatalogAnswer,
@@ -337,20 +342,24 @@ pub enum ModelText {
     /// A model that has been read.
     Read(Box<Model>),
     /// An object of the model file's shape.
-    Inline(Value),
+    Inline(UniqueJson),
 }
 
 impl ModelText {
     fn read(self) -> Result<Model, Failure> {
         Ok(match self {
             Self::Read(model) => *model,
-            Self::Inline(value) => Model::from_json(&value)?,
+            Self::Inline(json) => {
+                let value = json.into_value();
+                let value = value.map_err(|path| Failure::RepeatedKey { path })?;
+                Model::from_json(&value)?
+            }
         })
     }
 }
 
 impl<'de> Deserialize<'de> for ModelText {
     fn deserialize<D: Deserializer<'de>>(deserializer: D) -> Result<Self, D::Error> {
-        Value::deserialize(deserializer).map(Self::Inline)
+        UniqueJson::deserialize(deserializer).map(Self::Inline)
     }
 }

@@ -223,6 +223,18 @@ fn bad_lines_in_place() {
                "transforms": {"c": "7"}}]}}"#,
             "multiplet[0].transforms.c",
         ),
+        (
+            r#"{"command": "anomalies", "model": {"symmetry": [{"label": "c", "algebra": "SU(3)"}],
+               "multiplet": [{"label": "q", "field": "left-handed fermion", "copies": 3,
+               "copies": 1, "transforms": {"c": "3"}}]}}"#,
+            "model: multiplet[0].copies: this key is written twice",
+        ),
+        (
+            r#"{"command": "audit", "model": {"symmetry": [{"label": "c", "algebra": "SU(3)"}],
+               "multiplet": [{"label": "q", "field": "left-handed fermion",
+               "transforms": {"c": "3", "c": "3bar"}}]}}"#,
+            "model: multiplet[0].transforms.c: this key is written twice",
+        ),
     ];
     let good = r#"{"command": "irrep", "algebra": "SU(5)", "irrep": "5"}"#;
     let mut input = String::new();
