@@ -68,7 +68,8 @@ pub enum Request {
         /// The degree, which a partition tells by itself.
         #[serde(default)]
         degree: Option<u32>,
-        /// `symmetric`, `antisymmetric` or a partition such as `2,1`.
+        /// `symmetric`, which it is unless given, `antisymmetric` or a partition such as `2,1`.
+        #[serde(default = "symmetric")]
         symmetry: String,
         /// Limits of one's own.
         #[serde(default)]
@@ -198,6 +199,10 @@ fn in_json_words(error: &serde_json::Error) -> String {
         said = said.replacen(rust, json, 1);
     }
     said
+}
+
+fn symmetric() -> String {
+    "symmetric".to_owned()
 }
 
 fn read_algebra(written: &str) -> Result<SimpleAlgebra, Failure> {

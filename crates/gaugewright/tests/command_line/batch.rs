@@ -256,6 +256,18 @@ fn bad_lines_in_place() {
     }
 }
 
+/// `symmetry` as it may be written, and what a command line says for the same.
+#[test]
+fn symmetries_of_a_power() {
+    for (keys, arguments) in [
+        (r#""degree": 2"#, "--degree 2"),
+    ] {
+        let line = format!(r#"{{"command": "power", "algebra": "G2", "irrep": 7, {keys}}}"#);
+        let expected = crate::run::json_words(&format!("power G2 7 {arguments}"));
+        assert_eq!(answers(line.as_bytes()), [expected], "{line}");
+    }
+}
+
 #[test]
 fn lines_that_are_no_text() {
     let good = r#"{"command": "irrep", "algebra": "SU(5)", "irrep": "5"}"#;
