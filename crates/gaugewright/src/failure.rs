@@ -14,7 +14,10 @@ pub enum Failure {
     #[error("{0} (--max-terms, --max-weights; max_terms, max_weights in a batch)")]
     BeyondLimit(roots::Error),
     /// A power whose symmetry and degree do not fit together.
-    #[error("{0}; write --degree 2 --symmetry symmetric, or a partition of the degree such as 2,1")]
+    #[error(
+        "{0}; give a degree such as 2 with the symmetry symmetric or antisymmetric, \
+         or as symmetry a partition of the degree such as 2,1"
+    )]
     Power(String),
     /// A line of a batch that is no request.
     #[error(
