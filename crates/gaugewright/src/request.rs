@@ -7,6 +7,7 @@ use serde::Deserialize;
 use serde::de::{self, Deserializer};
 use serde_json::Value;
 
+mod keys;
 #[path = "unique_json.rs"]
 mod unique_json;
 
@@ -40,10 +41,10 @@ pub enum Request {
         /// Its name or labels.
         irrep: IrrepText,
         /// Which weights are listed.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::weights")]
         weights: Option<WeightsAsked>,
         /// How many weights may be listed.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_weights")]
         max_weights: Option<usize>,
     },
     /// A tensor product.
@@ -53,10 +54,10 @@ pub enum Request {
         /// The irreps that are multiplied.
         factors: Vec<IrrepText>,
         /// Limits of one's own.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_terms")]
         max_terms: Option<usize>,
         /// Limits of one's own.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_weights")]
         max_weights: Option<u64>,
     },
     /// The part of a tensor power with one symmetry.
@@ -66,16 +67,16 @@ pub enum Request {
         /// The irrep.
         irrep: IrrepText,
         /// The degree, which a partition tells by itself.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::degree")]
         degree: Option<u32>,
         /// `symmetric`, which it is unless given, `antisymmetric` or a partition such as `2,1`.
-        #[serde(default = "symmetric")]
+        #[serde(default = "symmetric", deserialize_with = "keys::symmetry")]
         symmetry: String,
         /// Limits of one's own.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_terms")]
         max_terms: Option<usize>,
         /// Limits of one's own.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_weights")]
         max_weights: Option<u64>,
     },
     /// Irreps up to a bound.
@@ -89,7 +90,7 @@ pub enum Request {
         #[serde(default)]
         max_index: Option<WholeText>,
         /// How many may be listed.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::limit")]
         limit: Option<usize>,
     },
     /// Every anomaly condition of a model.
@@ -193,8 +194,14 @@ fn in_json_words(error: &serde_json::Error) -> String {
         ("duplicate field", "duplicate key"),
         ("expected variant identifier", "expected a JSON object"),
         ("sequence", "list"),
+        ("expected ident", "expected a value"),
+        // A request is one line.
+        (" at line 1 column", " at column"),
     ];
     let mut said = error.to_string();
+    if error.is_syntax() {
+        said = format!("the line is no JSON: {said}");
+    }
     for (rust, json) in words {
         said = said.replacen(rust, json, 1);
     }
