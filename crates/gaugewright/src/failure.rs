@@ -14,7 +14,10 @@ pub enum Failure {
     #[error("{0} (--max-terms, --max-weights; max_terms, max_weights in a batch)")]
     BeyondLimit(roots::Error),
     /// A power whose symmetry and degree do not fit together.
-    #[error("{0}; write --degree 2 --symmetry symmetric, or a partition of the degree such as 2,1")]
+    #[error(
+        "{0}; give a degree such as 2 with the symmetry symmetric or antisymmetric, \
+         or as symmetry a partition of the degree such as 2,1"
+    )]
     Power(String),
     /// A line of a batch that is no request.
     #[error(
@@ -35,6 +38,12 @@ pub enum Failure {
     /// A model that is wrong.
     #[error("model: {0}")]
     Model(#[from] model::ModelFileError),
+    /// A model in JSON with a key written twice in one object.
+    #[error("model: {path}: this key is written twice in one object; write it once")]
+    RepeatedKey {
+        /// Where the second one stands, such as `multiplet[0].copies`.
+        path: String,
+    },
     /// A model file with a mistake.
     #[error("{}: {error}", .path.display())]
     ModelFile {

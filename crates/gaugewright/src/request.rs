@@ -7,6 +7,12 @@ use serde::Deserialize;
 use serde::de::{self, Deserializer};
 use serde_json::Value;
 
+mod keys;
+#[path = "unique_json.rs"]
+mod unique_json;
+
+pub use unique_json::UniqueJson;
+
 use crate::Failure;
 use crate::answer::{
     AlgebraAnswer, AnomaliesAnswer, Answer, AuditAnswer, CATALOG_LIMIT, CatalogAnswer,
@@ -35,10 +41,10 @@ pub enum Request {
         /// Its name or labels.
         irrep: IrrepText,
         /// Which weights are listed.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::weights")]
         weights: Option<WeightsAsked>,
         /// How many weights may be listed.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_weights")]
         max_weights: Option<usize>,
     },
     /// A tensor product.
@@ -48,10 +54,10 @@ pub enum Request {
         /// The irreps that are multiplied.
         factors: Vec<IrrepText>,
         /// Limits of one's own.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_terms")]
         max_terms: Option<usize>,
         /// Limits of one's own.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_weights")]
         max_weights: Option<u64>,
     },
     /// The part of a tensor power with one symmetry.
@@ -61,15 +67,16 @@ pub enum Request {
         /// The irrep.
         irrep: IrrepText,
         /// The degree, which a partition tells by itself.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::degree")]
         degree: Option<u32>,
-        /// `symmetric`, `antisymmetric` or a partition such as `2,1`.
+        /// `symmetric`, which it is unless given, `antisymmetric` or a partition such as `2,1`.
+        #[serde(default = "symmetric", deserialize_with = "keys::symmetry")]
         symmetry: String,
         /// Limits of one's own.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_terms")]
         max_terms: Option<usize>,
         /// Limits of one's own.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::max_weights")]
         max_weights: Option<u64>,
     },
     /// Irreps up to a bound.
@@ -83,7 +90,7 @@ pub enum Request {
         #[serde(default)]
         max_index: Option<WholeText>,
         /// How many may be listed.
-        #[serde(default)]
+        #[serde(default, deserialize_with = "keys::limit")]
         limit: Option<usize>,
     },
     /// Every anomaly condition of a model.
@@ -187,12 +194,22 @@ fn in_json_words(error: &serde_json::Error) -> String {
         ("duplicate field", "duplicate key"),
         ("expected variant identifier", "expected a JSON object"),
         ("sequence", "list"),
+        ("expected ident", "expected a value"),
+        // A request is one line.
+        (" at line 1 column", " at column"),
     ];
     let mut said = error.to_string();
+    if error.is_syntax() {
+        said = format!("the line is no JSON: {said}");
+    }
     for (rust, json) in words {
         said = said.replacen(rust, json, 1);
     }
     said
+}
+
+fn symmetric() -> String {
+    "symmetric".to_owned()
 }
 
 fn read_algebra(written: &str) -> Result<SimpleAlgebra, Failure> {
@@ -337,20 +354,24 @@ pub enum ModelText {
     /// A model that has been read.
     Read(Box<Model>),
     /// An object of the model file's shape.
-    Inline(Value),
+    Inline(UniqueJson),
 }
 
 impl ModelText {
     fn read(self) -> Result<Model, Failure> {
         Ok(match self {
             Self::Read(model) => *model,
-            Self::Inline(value) => Model::from_json(&value)?,
+            Self::Inline(json) => {
+                let value = json.into_value();
+                let value = value.map_err(|path| Failure::RepeatedKey { path })?;
+                Model::from_json(&value)?
+            }
         })
     }
 }
 
 impl<'de> Deserialize<'de> for ModelText {
     fn deserialize<D: Deserializer<'de>>(deserializer: D) -> Result<Self, D::Error> {
-        Value::deserialize(deserializer).map(Self::Inline)
+        UniqueJson::deserialize(deserializer).map(Self::Inline)
     }
 }

@@ -241,7 +241,7 @@ impl Problem {
             Self::Roots(roots::Error::LabelCount { expected, .. }) => {
                 format!("write {expected} in brackets, or a dimension")
             }
-            Self::Roots(error) => split(error).1,
+            Self::Roots(error) => as_symmetries(error).map_or_else(|| split(error).1, Into::into),
             Self::ProductGroup { .. } => "write one symmetry for each factor".into(),
             Self::BadCyclicOrder { .. } => {
                 format!("write Z(2) or larger, at most Z({})", u32::MAX)
@@ -299,6 +299,21 @@ impl std::fmt::Display for Problem {
 }
 
 impl std::error::Error for Problem {}
+
+/// What to write for a group that is not simple: a symmetry may be U(1), but no product.
+fn as_symmetries(error: &roots::Error) -> Option<&'static str> {
+    let roots::Error::NotSimple { what, .. } = error else {
+        return None;
+    };
+    match *what {
+        "SU(2) x SU(2)" => Some("write two symmetries, each SU(2)"),
+        "abelian" => Some("write U(1)"),
+        "a product with U(1)" => {
+            Some("write two symmetries, U(1) and SU(N) with the N that is meant")
+        }
+        _ => None,
+    }
+}
 
 /// What is wrong and what to write instead: an error of `roots` is one sentence with a semicolon
 /// between, the first after the text it repeats, which may hold others.

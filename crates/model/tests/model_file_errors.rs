@@ -118,7 +118,10 @@ algebra = "SU(3)" => group = "SU(3)" @ 6:1 "algebra"
 "SU(3)" => 3 @ 6:11 such as "SU(3)"
 "SU(3)" => ["SU(3)"] @ 6:11 such as "SU(3)"
 "SU(3)" => "SU(3) x SU(2)" @ 6:11 one symmetry for each factor
-"SU(3)" => "SO(4)" @ 6:11 SU(2) x SU(2)
+"SU(3)" => "SO(4)" @ 6:11 write two symmetries, each SU(2)
+"SU(3)" => "D2" @ 6:11 write two symmetries, each SU(2)
+"SU(3)" => "SO(2)" @ 6:11 write U(1)
+"SU(3)" => "U(2)" @ 6:11 write two symmetries, U(1) and SU(N)
 "SU(3)" => "SU(1000000)" @ 6:11 SU(257)
 "SU(3)" => "Z(1)" @ 6:11 write Z(2) or larger
 "SU(3)" => "SU(5)" @ 21:25 5 = (1000), 5bar = (0001)

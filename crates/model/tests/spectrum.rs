@@ -103,7 +103,7 @@ fn groups_both_ways() {
         ("Z(0)", "write Z(2) or larger"),
         ("Z(99999999999)", "at most Z(4294967295)"),
         ("SU3)", "U(1) or Z(N)"),
-        ("SO(4)", "SU(2) x SU(2)"),
+        ("SO(4)", "write two symmetries, each SU(2)"),
         ("SU(1000000)", "SU(257)"),
         ("", "U(1) or Z(N)"),
         ("Z(-3)", "U(1) or Z(N)"),

@@ -189,6 +189,14 @@ pub enum Error {
         /// The largest sum that is accepted.
         most: u32,
     },
+    /// A power of a degree beyond [`Partition::MOST`](crate::Partition::MOST).
+    #[error("degree {degree} is beyond {most}, the largest power that is taken")]
+    DegreeTooLarge {
+        /// The degree.
+        degree: u32,
+        /// The largest that is accepted.
+        most: u32,
+    },
     /// The number of charges or irreps is not the number of factors.
     #[error("{algebra} has {expected} factors; {found} irreps or charges were given")]
     FactorCount {

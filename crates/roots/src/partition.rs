@@ -52,22 +52,31 @@ impl Partition {
         }
     }
 
+    fn check_size(size: u32) -> Result<(), Error> {
+        if size <= Self::MOST {
+            return Ok(());
+        }
+        Err(Error::DegreeTooLarge {
+            degree: size,
+            most: Self::MOST,
+        })
+    }
+
     /// One part: the trivial irrep, and as a class of permutations the one long cycle.
     ///
     /// # Errors
-    /// [`Error::BadPartition`] beyond [`MOST`](Self::MOST).
+    /// [`Error::DegreeTooLarge`] beyond [`MOST`](Self::MOST).
     pub fn row(size: u32) -> Result<Self, Error> {
+        Self::check_size(size)?;
         Self::new(&[size])
     }
 
     /// All parts 1: the sign, and as a class of permutations the identity.
     ///
     /// # Errors
-    /// [`Error::BadPartition`] beyond [`MOST`](Self::MOST).
+    /// [`Error::DegreeTooLarge`] beyond [`MOST`](Self::MOST).
     pub fn column(size: u32) -> Result<Self, Error> {
-        if size > Self::MOST {
-            return Err(Self::bad(&size.to_string()));
-        }
+        Self::check_size(size)?;
         Self::new(&vec![1; size as usize])
     }
 
@@ -86,11 +95,9 @@ impl Partition {
     /// All partitions of `size`, the single row first.
     ///
     /// # Errors
-    /// [`Error::BadPartition`] beyond [`MOST`](Self::MOST).
+    /// [`Error::DegreeTooLarge`] beyond [`MOST`](Self::MOST).
     pub fn all(size: u32) -> Result<Vec<Self>, Error> {
-        if size > Self::MOST {
-            return Err(Self::bad(&size.to_string()));
-        }
+        Self::check_size(size)?;
         let mut found = Vec::new();
         extend(&mut Vec::new(), size, size, &mut found);
         Ok(found)
@@ -239,6 +246,16 @@ mod tests {
                 }
             }
         }
+    }
+
+    #[test]
+    fn degrees_too_large() {
+        let says = "degree 41 is beyond 40, the largest power that is taken";
+        assert_eq!(Partition::row(41).unwrap_err().to_string(), says);
+        assert_eq!(Partition::column(41).unwrap_err().to_string(), says);
+        assert_eq!(Partition::all(41).unwrap_err().to_string(), says);
+        assert_eq!(Partition::row(40).unwrap().size(), 40);
+        assert_eq!(Partition::column(40).unwrap().size(), 40);
     }
 
     #[test]

@@ -83,7 +83,9 @@ product | SU(5) | 10 | 11 -> no irrep "11"
 product | SU(5) | 10 | -1 -> "-1"
 power | SU(5) | 10 | --degree | 2 | --symmetry | 3,1 -> partition
 power | SU(5) | 10 | --degree | 2 | --symmetry | sym -> sym
-power | SU(5) | 10 -> degree
+power | SU(5) | 10 -> needs a degree; give a degree
+power | SU(5) | 10 | --degree | 41 -> degree 41 is beyond 40, the largest power that is taken
+power | SU(5) | 10 | --symmetry | antisymmetric | --degree | 41 -> degree 41 is beyond 40
 "#,
     );
 }

@@ -51,7 +51,9 @@ title = "Quarks" => title = "" @ 2:9 title
 title = "Quarks" => title = "Quarks @ 2:16 quotation marks
 label = "colour" => lable = "colour" @ 4:1 did you mean "label"
 algebra = "SU(3)" => algebra = "SU(1)" @ 5:11 SU(2) or larger
-algebra = "SU(3)" => algebra = "SO(4)" @ 5:11 SU(2) x SU(2)
+algebra = "SU(3)" => algebra = "SO(4)" @ 5:11 write two symmetries, each SU(2)
+algebra = "SU(3)" => algebra = "SO(2)" @ 5:11 write U(1)
+algebra = "SU(3)" => algebra = "U(2)" @ 5:11 write two symmetries, U(1) and SU(N)
 algebra = "SU(3)" => algebra = "E9" @ 5:11 rank 6 to 8
 algebra = "SU(3)" => algebra = "SU(1000000)" @ 5:11 SU(257)
 algebra = "SU(3)" => algebra = 3 @ 5:11 SU(3)

@@ -145,6 +145,50 @@ fn numbering() {
 fn bad_lines_in_place() {
     let bad = [
         (r#"nonsense"#, "one JSON object"),
+        (
+            r#"not json"#,
+            "the line is no JSON: expected a value at column 2",
+        ),
+        (
+            r#"{"command": "irrep", "algebra": "G2", "irrep": "7", "weights": "ALL"}"#,
+            "\"weights\" cannot be \"ALL\": it is \"dominant\" or \"all\"",
+        ),
+        (
+            r#"{"command": "irrep", "algebra": "G2", "irrep": "7", "max_weights": 1.5}"#,
+            "\"max_weights\" cannot be 1.5: it is a whole number",
+        ),
+        (
+            r#"{"command": "power", "algebra": "G2", "irrep": "7", "degree": -1}"#,
+            "\"degree\" cannot be -1: it is a whole number from 0 to 4294967295",
+        ),
+        (
+            r#"{"command": "power", "algebra": "G2", "irrep": "7", "degree": "2"}"#,
+            "\"degree\" cannot be \"2\"",
+        ),
+        (
+            r#"{"command": "power", "algebra": "G2", "irrep": "7", "degree": 2, "max_terms": []}"#,
+            "\"max_terms\" cannot be []",
+        ),
+        (
+            r#"{"command": "power", "algebra": "G2", "irrep": "7", "symmetry": [2, 0.5]}"#,
+            "\"symmetry\" cannot be [2,0.5]",
+        ),
+        (
+            r#"{"command": "power", "algebra": "G2", "irrep": "7", "symmetry": 2}"#,
+            "\"symmetry\" cannot be 2",
+        ),
+        (
+            r#"{"command": "power", "algebra": "G2", "irrep": "7", "symmetry": [1, 2]}"#,
+            "\"1,2\" is no partition",
+        ),
+        (
+            r#"{"command": "power", "algebra": "G2", "irrep": "7", "symmetry": "antisymmetric"}"#,
+            "give a degree",
+        ),
+        (
+            r#"{"command": "catalog", "algebra": "G2", "limit": -1}"#,
+            "\"limit\" cannot be -1",
+        ),
         (r#"{"command": "irrep""#, "EOF"),
         (r#"[1, 2]"#, "JSON object"),
         (r#""irrep""#, "an object with the key"),
@@ -223,6 +267,18 @@ fn bad_lines_in_place() {
                "transforms": {"c": "7"}}]}}"#,
             "multiplet[0].transforms.c",
         ),
+        (
+            r#"{"command": "anomalies", "model": {"symmetry": [{"label": "c", "algebra": "SU(3)"}],
+               "multiplet": [{"label": "q", "field": "left-handed fermion", "copies": 3,
+               "copies": 1, "transforms": {"c": "3"}}]}}"#,
+            "model: multiplet[0].copies: this key is written twice",
+        ),
+        (
+            r#"{"command": "audit", "model": {"symmetry": [{"label": "c", "algebra": "SU(3)"}],
+               "multiplet": [{"label": "q", "field": "left-handed fermion",
+               "transforms": {"c": "3", "c": "3bar"}}]}}"#,
+            "model: multiplet[0].transforms.c: this key is written twice",
+        ),
     ];
     let good = r#"{"command": "irrep", "algebra": "SU(5)", "irrep": "5"}"#;
     let mut input = String::new();
@@ -236,11 +292,25 @@ fn bad_lines_in_place() {
         assert!(error.contains(says), "{line}: {error}");
         assert_eq!(pair[0].as_object().unwrap().len(), 1);
         for word in [
-            "enum", "variant", "u32", "usize", "sequence", "struct", "field `",
+            "enum", "variant", "u32", "usize", "sequence", "struct", "field `", "ident", "--",
         ] {
             assert!(!error.contains(word), "a word of Rust in {error}");
         }
         assert_eq!(pair[1]["dimension"], 5);
+    }
+}
+
+/// `symmetry` as it may be written, and what a command line says for the same.
+#[test]
+fn symmetries_of_a_power() {
+    for (keys, arguments) in [
+        (r#""degree": 2"#, "--degree 2"),
+        (r#""symmetry": [2, 1]"#, "--symmetry 2,1"),
+        (r#""symmetry": "2,1", "degree": null"#, "--symmetry 2,1"),
+    ] {
+        let line = format!(r#"{{"command": "power", "algebra": "G2", "irrep": 7, {keys}}}"#);
+        let expected = crate::run::json_words(&format!("power G2 7 {arguments}"));
+        assert_eq!(answers(line.as_bytes()), [expected], "{line}");
     }
 }
 
