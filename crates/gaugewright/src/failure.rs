@@ -3,6 +3,8 @@
 use std::io;
 use std::path::{Path, PathBuf};
 
+use roots::LimitKind;
+
 /// Unusable input: what was wrong, where, and what to write instead.
 #[derive(Debug, thiserror::Error)]
 #[non_exhaustive]
@@ -10,9 +12,17 @@ pub enum Failure {
     /// A name, label or bound.
     #[error(transparent)]
     Algebra(roots::Error),
-    /// An answer beyond a limit that can be raised.
-    #[error("{0} (--max-terms, --max-weights; max_terms, max_weights in a batch)")]
-    BeyondLimit(roots::Error),
+    /// An answer beyond a limit that an option raises.
+    #[error("{error} ({})", written(.limit))]
+    BeyondLimit {
+        /// What is beyond it.
+        error: roots::Error,
+        /// Which limit it is.
+        limit: LimitKind,
+    },
+    /// A catalogue beyond its limit.
+    #[error("{0} (--limit, in a batch limit)")]
+    TooMany(roots::Error),
     /// A power whose symmetry and degree do not fit together.
     #[error(
         "{0}; give a degree such as 2 with the symmetry symmetric or antisymmetric, \
@@ -76,9 +86,22 @@ pub enum Failure {
 impl From<roots::Error> for Failure {
     fn from(error: roots::Error) -> Self {
         match error {
-            error @ roots::Error::BeyondLimit { .. } => Self::BeyondLimit(error),
-            error => Self::Algebra(error),
+            roots::Error::BeyondLimit {
+                raised_by: Some(limit),
+                ..
+            } => Self::BeyondLimit { error, limit },
+            roots::Error::TooMany { .. } => Self::TooMany(error),
+            _ => Self::Algebra(error),
         }
+    }
+}
+
+/// The option that raises the limit.
+const fn written(limit: &LimitKind) -> &'static str {
+    match limit {
+        LimitKind::Terms => "--max-terms, in a batch max_terms",
+        LimitKind::DominantWeights => "--max-dominant-weights, in a batch max_dominant_weights",
+        LimitKind::Weights => "--max-weights, in a batch max_weights",
     }
 }
 

@@ -8,7 +8,6 @@ use serde::de::{self, Deserializer};
 use serde_json::Value;
 
 mod keys;
-#[path = "unique_json.rs"]
 mod unique_json;
 
 pub use unique_json::UniqueJson;
@@ -59,6 +58,9 @@ pub enum Request {
         /// Limits of one's own.
         #[serde(default, deserialize_with = "keys::max_weights")]
         max_weights: Option<u64>,
+        /// Limits of one's own.
+        #[serde(default, deserialize_with = "keys::max_dominant_weights")]
+        max_dominant_weights: Option<usize>,
     },
     /// The part of a tensor power with one symmetry.
     Power {
@@ -78,6 +80,9 @@ pub enum Request {
         /// Limits of one's own.
         #[serde(default, deserialize_with = "keys::max_weights")]
         max_weights: Option<u64>,
+        /// Limits of one's own.
+        #[serde(default, deserialize_with = "keys::max_dominant_weights")]
+        max_dominant_weights: Option<usize>,
     },
     /// Irreps up to a bound.
     Catalog {
@@ -141,11 +146,12 @@ impl Request {
                 factors,
                 max_terms,
                 max_weights,
+                max_dominant_weights,
             } => {
                 let algebra = read_algebra(&algebra)?;
                 let read = factors.iter().map(|factor| factor.read(algebra, numbering));
                 let factors = read.collect::<Result<Vec<_>, _>>()?;
-                let limits = limits(max_terms, max_weights);
+                let limits = limits(max_terms, max_weights, max_dominant_weights);
                 Box::new(DecompositionAnswer::product(
                     algebra, &factors, &limits, numbering,
                 )?)
@@ -157,10 +163,11 @@ impl Request {
                 symmetry,
                 max_terms,
                 max_weights,
+                max_dominant_weights,
             } => {
                 let irrep = irrep.read(read_algebra(&algebra)?, numbering)?;
                 let symmetry = PowerSymmetry::read(&symmetry, degree)?;
-                let limits = limits(max_terms, max_weights);
+                let limits = limits(max_terms, max_weights, max_dominant_weights);
                 Box::new(DecompositionAnswer::power(
                     &irrep, &symmetry, &limits, numbering,
                 )?)
@@ -216,13 +223,20 @@ fn read_algebra(written: &str) -> Result<SimpleAlgebra, Failure> {
     Ok(written.parse()?)
 }
 
-fn limits(max_terms: Option<usize>, max_weights: Option<u64>) -> Limits {
+fn limits(
+    max_terms: Option<usize>,
+    max_weights: Option<u64>,
+    max_dominant_weights: Option<usize>,
+) -> Limits {
     let mut limits = Limits::default();
     if let Some(terms) = max_terms {
         limits = limits.with_terms(terms);
     }
     if let Some(weights) = max_weights {
         limits = limits.with_weights(weights);
+    }
+    if let Some(weights) = max_dominant_weights {
+        limits = limits.with_dominant_weights(weights);
     }
     limits
 }

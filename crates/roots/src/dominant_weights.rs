@@ -5,7 +5,7 @@ use num_bigint::BigInt;
 use crate::frame::Frame;
 use crate::lane_table::LaneTable;
 use crate::lanes::Lanes;
-use crate::{Error, SimpleAlgebra};
+use crate::{Error, LimitKind, SimpleAlgebra};
 
 /// The dominant weights of an irrep, the highest first, none before one that it is below.
 ///
@@ -91,6 +91,7 @@ fn too_many<L: Lanes>(frame: &Frame<L>, highest: &L, limit: usize) -> Error {
         what: "the list of dominant weights".to_owned(),
         size: format!("up to 10^{digits} entries"),
         limit: limit as u64,
+        raised_by: Some(LimitKind::DominantWeights),
         instead: "take smaller irreps, or raise the limit on dominant weights".to_owned(),
     }
 }

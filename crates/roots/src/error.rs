@@ -148,6 +148,8 @@ pub enum Error {
         size: String,
         /// The limit that applies.
         limit: u64,
+        /// Which of the [`Limits`](crate::Limits) that is; none where it cannot be raised.
+        raised_by: Option<LimitKind>,
         /// What to do about it.
         instead: String,
     },
@@ -225,6 +227,17 @@ pub enum Error {
         /// What was written.
         written: String,
     },
+}
+
+/// The limits that a caller may raise.
+#[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+pub enum LimitKind {
+    /// Different irreps in a result.
+    Terms,
+    /// Dominant weights in one irrep.
+    DominantWeights,
+    /// Weights walked through, or listed.
+    Weights,
 }
 
 fn plural(count: &usize, noun: &str) -> String {

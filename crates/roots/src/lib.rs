@@ -78,7 +78,7 @@ pub use congruency::{Center, Congruency};
 pub use decomposition::Decomposition;
 pub use dimension_search::CatalogBound;
 pub use dynkin_diagram::DynkinDiagram;
-pub use error::Error;
+pub use error::{Error, LimitKind};
 pub use integer_lattice::{FiniteAbelian, rows_without};
 pub use irrep::Irrep;
 pub use irrep_name::{IrrepName, NameBook};

@@ -1,6 +1,6 @@
 //! Bounds on the size of what is computed.
 
-use crate::Error;
+use crate::{Error, LimitKind};
 
 /// Bounds on the memory and the time that one product, power or weight system may take.
 ///
@@ -80,6 +80,7 @@ impl Limits {
             what: "the list of irreps".to_owned(),
             size: format!("up to {} terms", short(&at_most)),
             limit: self.terms as u64,
+            raised_by: Some(LimitKind::Terms),
             instead: "take smaller irreps, or raise the limit on terms".to_owned(),
         }
     }
@@ -89,6 +90,7 @@ impl Limits {
             what: "this product".to_owned(),
             size: format!("a walk through {} weights", short(&number)),
             limit: self.weights,
+            raised_by: Some(LimitKind::Weights),
             instead: "take smaller irreps, or raise the limit on weights".to_owned(),
         }
     }

@@ -121,6 +121,7 @@ pub(crate) fn within_u32(bound: u64, what: &str) -> Result<(), Error> {
         what: what.to_owned(),
         size: format!("labels up to {bound}"),
         limit: u32::MAX.into(),
+        raised_by: None,
         instead: "take irreps with smaller labels".to_owned(),
     })
 }

@@ -1,7 +1,7 @@
 //! Facts of one irrep.
 
 use num_bigint::BigUint;
-use roots::{Congruency, Irrep, Limits, NameBook, Numbering, Weight};
+use roots::{Congruency, Irrep, LimitKind, Limits, NameBook, Numbering, Weight};
 use serde::{Serialize, Serializer};
 
 use super::Answer;
@@ -69,8 +69,11 @@ impl IrrepAnswer {
             weight: order.from_slansky(irrep.algebra().cartan_type(), weight.labels()),
             multiplicity: multiplicity.clone().into(),
         };
+        let dominant = irrep
+            .dominant_weights_within(&limits)
+            .map_err(|_| too_many(&irrep, most))?;
         let mut weights = Vec::new();
-        for (dominant, multiplicity) in irrep.dominant_weights_within(&limits)? {
+        for (dominant, multiplicity) in dominant {
             let orbit: Vec<WeightEntry> = match asked {
                 WeightsAsked::Dominant => vec![entry(&dominant, &multiplicity)],
                 WeightsAsked::All if dominant.orbit_size() > BigUint::from(most) => {
@@ -119,12 +122,14 @@ impl IrrepAnswer {
 }
 
 fn too_many(irrep: &Irrep, most: usize) -> Failure {
-    Failure::BeyondLimit(roots::Error::BeyondLimit {
+    roots::Error::BeyondLimit {
         what: format!("the list of weights of {}", irrep.bracketed()),
         size: format!("more than {most} entries"),
         limit: most as u64,
+        raised_by: Some(LimitKind::Weights),
         instead: "ask for the dominant ones, or raise the limit on weights".to_owned(),
-    })
+    }
+    .into()
 }
 
 impl Answer for IrrepAnswer {

@@ -78,3 +78,9 @@ fn whole<'de, D: Deserializer<'de>, N: TryFrom<u64>>(
         ))
     })
 }
+
+pub(super) fn max_dominant_weights<'de, D: Deserializer<'de>>(
+    d: D,
+) -> Result<Option<usize>, D::Error> {
+    whole(d, "max_dominant_weights", usize::MAX as u64)
+}

@@ -133,6 +133,9 @@ pub(crate) struct LimitArguments {
     /// How many weights may be walked through; 20 thousand million unless given.
     #[arg(long, value_name = "N")]
     max_weights: Option<u64>,
+    /// How many dominant weights one irrep may have; 200 thousand unless given.
+    #[arg(long, value_name = "N")]
+    max_dominant_weights: Option<usize>,
 }
 
 /// Which weights are listed.
@@ -172,6 +175,7 @@ impl Command {
                 factors: irreps.into_iter().map(IrrepText::Written).collect(),
                 max_terms: limits.max_terms,
                 max_weights: limits.max_weights,
+                max_dominant_weights: limits.max_dominant_weights,
             },
             Self::Power {
                 algebra,
@@ -186,6 +190,7 @@ impl Command {
                 symmetry,
                 max_terms: limits.max_terms,
                 max_weights: limits.max_weights,
+                max_dominant_weights: limits.max_dominant_weights,
             },
             Self::Catalog {
                 algebra,
