@@ -16,12 +16,12 @@ pub enum Anomaly {
         /// The simple group.
         gauge: usize,
         /// The U(1).
-        charge: [usize; 1],
+        charge: usize,
     },
     /// Three U(1)s, alike or not, in rising order.
     Charges([usize; 3]),
     /// `gravity^2 U(1)`.
-    GravityCharge([usize; 1]),
+    GravityCharge(usize),
     /// The parity of the Dynkin index sum of SU(2) or Sp(2N).
     Parity(usize),
     /// `G^2 Z(N)`.
@@ -76,10 +76,7 @@ impl Anomaly {
     pub fn all(spectrum: &Spectrum) -> impl Iterator<Item = Self> + '_ {
         let cubic = simple(spectrum).filter(|&(_, algebra)| has_cubic_index(algebra));
         let mixed = simple(spectrum).flat_map(move |(gauge, _)| {
-            abelian(spectrum).map(move |charge| Self::GaugeSquaredCharge {
-                gauge,
-                charge: [charge],
-            })
+            abelian(spectrum).map(move |charge| Self::GaugeSquaredCharge { gauge, charge })
         });
         let parity = simple(spectrum).filter(|&(_, algebra)| has_parity(algebra));
         let discrete = discrete(spectrum).flat_map(move |discrete| {
@@ -94,7 +91,7 @@ impl Anomaly {
             .map(|(gauge, _)| Self::GaugeCubed(gauge))
             .chain(mixed)
             .chain(triples(spectrum).map(Self::Charges))
-            .chain(abelian(spectrum).map(|charge| Self::GravityCharge([charge])))
+            .chain(abelian(spectrum).map(Self::GravityCharge))
             .chain(parity.map(|(gauge, _)| Self::Parity(gauge)))
             .chain(discrete)
     }
@@ -115,19 +112,25 @@ impl Anomaly {
     /// Places of the symmetries in it, with repetition.
     #[must_use]
     pub fn symmetries(self) -> Vec<usize> {
+        let (places, count) = self.places();
+        places[..count].to_vec()
+    }
+
+    /// Places of the symmetries in it, and how many of the three are used.
+    const fn places(self) -> ([usize; 3], usize) {
         match self {
-            Self::GaugeCubed(gauge) => vec![gauge; 3],
+            Self::GaugeCubed(gauge) => ([gauge; 3], 3),
             Self::GaugeSquaredCharge {
                 gauge,
-                charge: [other],
+                charge: other,
             }
             | Self::GaugeSquaredDiscrete {
                 gauge,
                 discrete: other,
-            } => vec![gauge, gauge, other],
-            Self::Charges(charges) => charges.to_vec(),
-            Self::GravityCharge([one]) | Self::Parity(one) | Self::GravityDiscrete(one) => {
-                vec![one]
+            } => ([gauge, gauge, other], 3),
+            Self::Charges(charges) => (charges, 3),
+            Self::GravityCharge(one) | Self::Parity(one) | Self::GravityDiscrete(one) => {
+                ([one; 3], 1)
             }
         }
     }
@@ -141,28 +144,18 @@ impl Anomaly {
     /// Whether it must cancel: all its symmetries are gauged.
     #[must_use]
     pub fn must_cancel(self, spectrum: &Spectrum) -> bool {
-        let gauged = |place: usize| spectrum.symmetries()[place].is_gauged();
-        match self {
-            Self::GaugeCubed(one)
-            | Self::Parity(one)
-            | Self::GravityCharge([one])
-            | Self::GravityDiscrete(one) => gauged(one),
-            Self::GaugeSquaredCharge {
-                gauge,
-                charge: [other],
-            }
-            | Self::GaugeSquaredDiscrete {
-                gauge,
-                discrete: other,
-            } => gauged(gauge) && gauged(other),
-            Self::Charges([a, b, c]) => gauged(a) && gauged(b) && gauged(c),
-        }
+        let (places, _) = self.places();
+        places
+            .iter()
+            .all(|&place| spectrum.symmetries()[place].is_gauged())
     }
 
     /// Places of the U(1)s in it, with repetition.
     pub(crate) const fn charges(&self) -> &[usize] {
         match self {
-            Self::GaugeSquaredCharge { charge, .. } | Self::GravityCharge(charge) => charge,
+            Self::GaugeSquaredCharge { charge, .. } | Self::GravityCharge(charge) => {
+                std::slice::from_ref(charge)
+            }
             Self::Charges(charges) => charges,
             Self::GaugeCubed(_)
             | Self::Parity(_)

@@ -111,6 +111,15 @@ impl CartanType {
         self.rank as usize
     }
 
+    /// Place of an exceptional type among the five: G2, F4, E6, E7, E8.
+    pub(crate) const fn exceptional_place(self) -> usize {
+        match self.family {
+            Family::G => 0,
+            Family::F => 1,
+            _ => self.rank() - 4,
+        }
+    }
+
     pub(crate) const fn rank_u16(self) -> u16 {
         self.rank
     }

@@ -3,7 +3,7 @@
 use std::collections::HashMap;
 use std::sync::OnceLock;
 
-use crate::{CartanMatrix, CartanType, DynkinDiagram, Family};
+use crate::{CartanMatrix, CartanType, DynkinDiagram};
 
 /// One positive root.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
@@ -89,12 +89,7 @@ impl RootSystem {
     /// five of them, so what is held is bounded.
     pub(crate) fn exceptional(cartan_type: CartanType) -> &'static Self {
         static HELD: [OnceLock<RootSystem>; 5] = [const { OnceLock::new() }; 5];
-        let place = match cartan_type.family() {
-            Family::G => 0,
-            Family::F => 1,
-            _ => cartan_type.rank() - 4,
-        };
-        HELD[place].get_or_init(|| Self::of(cartan_type))
+        HELD[cartan_type.exceptional_place()].get_or_init(|| Self::of(cartan_type))
     }
 
     fn push(&mut self, root: &Growing, lengths: &[u8]) {

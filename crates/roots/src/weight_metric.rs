@@ -5,7 +5,7 @@ use std::sync::OnceLock;
 use num_bigint::BigInt;
 use num_rational::BigRational;
 
-use crate::{CartanType, DynkinDiagram, Family, SimpleAlgebra};
+use crate::{CartanType, DynkinDiagram, SimpleAlgebra};
 
 /// Inner products of fundamental weights, longest root squared 2, as whole numbers over one
 /// denominator ([Slansky 1981]: his metric tensor G).
@@ -41,12 +41,8 @@ impl WeightMetric {
     /// The metric of an exceptional type, found once: there are five.
     pub(crate) fn exceptional(cartan_type: CartanType) -> &'static Self {
         static HELD: [OnceLock<WeightMetric>; 5] = [const { OnceLock::new() }; 5];
-        let place = match cartan_type.family() {
-            Family::G => 0,
-            Family::F => 1,
-            _ => cartan_type.rank() - 4,
-        };
-        HELD[place].get_or_init(|| Self::of(SimpleAlgebra::new(cartan_type)))
+        HELD[cartan_type.exceptional_place()]
+            .get_or_init(|| Self::of(SimpleAlgebra::new(cartan_type)))
     }
 
     /// Number of fundamental weights.

@@ -123,14 +123,14 @@ fn by_conditions(plan: &Plan, directions: &[Vec<i64>]) -> [BigRational; 2] {
     let (mut linear, mut cubic) = (BigRational::zero(), BigRational::zero());
     for one in report.conditions() {
         let polynomial = match one.anomaly() {
-            Anomaly::GravityCharge([place]) => {
+            Anomaly::GravityCharge(place) => {
                 linear += one.value() * charge(place);
                 continue;
             }
             Anomaly::GaugeCubed(place) => factors(place).1,
             Anomaly::GaugeSquaredCharge {
                 gauge,
-                charge: [place],
+                charge: place,
             } => factors(gauge).0 * charge(place) * whole(3),
             Anomaly::Charges(charges) => {
                 let product = charges
